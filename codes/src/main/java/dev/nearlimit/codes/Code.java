@@ -60,8 +60,8 @@ public final class Code {
         }
         Elimination reduced = Elimination.fromLastColumn(parityCheck.toDense());
         if (reduced.rank() == parityCheck.columns()) {
-            throw new InvalidCodeException("the parity-check matrix of " + designator + " has rank "
-                    + reduced.rank() + " = n, so that it admits only the zero word");
+            throw new InvalidCodeException("the parity-check matrix of " + designator + " has rank " + reduced.rank()
+                    + " = n, so that it admits only the zero word");
         }
         BitMatrix generator = reduced.nullSpace();
         int[] positions = reduced.freeColumns();
