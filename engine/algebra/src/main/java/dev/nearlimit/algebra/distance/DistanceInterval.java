@@ -2,7 +2,6 @@ package dev.nearlimit.algebra.distance;
 
 import dev.nearlimit.algebra.distance.MinimumDistance.Status;
 import dev.nearlimit.codes.Code;
-import dev.nearlimit.codes.gf2.BitMatrix;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
 import dev.nearlimit.codes.structure.BchStructure;
 import java.util.HashSet;
@@ -14,8 +13,7 @@ import java.util.stream.IntStream;
 
 /**
  * Encloses a minimum distance without a search: from below by the columns of the parity-check matrix and by the BCH bound
- * (Bose and Ray-Chaudhuri 1960, Hocquenghem 1959), from above by the lightest generator row and by
- * {@link DistanceBounds}.
+ * (Bose and Ray-Chaudhuri 1960, Hocquenghem 1959), from above by a light word and by {@link DistanceBounds}.
  */
 final class DistanceInterval {
     private DistanceInterval() {}
@@ -37,9 +35,9 @@ final class DistanceInterval {
             lowFrom = "at least " + designed + ": BCH bound";
         }
         DistanceBounds bounds = DistanceBounds.of(code.n(), code.k());
-        int lightest = lightestRow(code.generator());
-        if (lightest <= bounds.best()) {
-            return between(low, lowFrom, lightest, "a generator row has weight " + lightest, Status.FOUND);
+        LightWord light = LightWord.of(code.generator());
+        if (light.weight() <= bounds.best()) {
+            return between(low, lowFrom, light.weight(), light.description(), Status.FOUND);
         }
         String bound = "at most " + bounds.best() + ": " + bounds.nameOfBest() + " bound";
         return between(low, lowFrom, bounds.best(), bound, Status.PROVEN);
@@ -68,12 +66,5 @@ final class DistanceInterval {
             twice |= !seen.add(ones);
         }
         return twice ? 2 : 3;
-    }
-
-    private static int lightestRow(BitMatrix generator) {
-        return IntStream.range(0, generator.rows())
-                .map(generator::rowWeight)
-                .min()
-                .orElseThrow();
     }
 }

@@ -44,13 +44,35 @@ class DistanceReportTest {
         assertTrue(distance.value().isEmpty());
         assertEquals(3, distance.low());
         assertEquals(Status.FOUND, distance.status());
-        BitMatrix G = code.generator();
-        int lightest = 80;
-        for (int r = 0; r < 40; r++) {
-            lightest = Math.min(lightest, G.rowWeight(r));
+        LightWord light = LightWord.of(code.generator());
+        assertEquals(light.weight(), distance.high());
+        assertTrue(distance.how().endsWith(light.description()), distance.how());
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {1, 2, 3, 4, 5, 6})
+    void lightWordIsTheLightestOfMessageWeightUpToTwo(long seed) {
+        BitMatrix G = SmallCodes.random(seed, 100, 9).generator();
+        int lightest = 100;
+        int messageWeight = 0;
+        for (int message = 1; message < 1 << 9; message++) {
+            if (Integer.bitCount(message) > 2) {
+                continue;
+            }
+            int weight = 0;
+            for (int c = 0; c < 100; c++) {
+                boolean bit = false;
+                for (int r = 0; r < 9; r++) {
+                    bit ^= (message >>> r & 1) != 0 && G.get(r, c);
+                }
+                weight += bit ? 1 : 0;
+            }
+            if (weight < lightest || (weight == lightest && Integer.bitCount(message) < messageWeight)) {
+                lightest = weight;
+                messageWeight = Integer.bitCount(message);
+            }
         }
-        assertEquals(lightest, distance.high());
-        assertTrue(distance.how().endsWith("a generator row has weight " + lightest), distance.how());
+        assertEquals(new LightWord(lightest, messageWeight), LightWord.of(G), "seed " + seed);
     }
 
     @Test

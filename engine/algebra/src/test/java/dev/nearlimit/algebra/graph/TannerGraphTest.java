@@ -3,6 +3,7 @@ package dev.nearlimit.algebra.graph;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import dev.nearlimit.algebra.SmallCodes;
+import dev.nearlimit.codes.catalogue.Catalogue;
 import dev.nearlimit.codes.gf2.BitMatrix;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
 import java.util.Map;
@@ -10,6 +11,7 @@ import java.util.OptionalInt;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class TannerGraphTest {
@@ -95,5 +97,31 @@ class TannerGraphTest {
         TannerGraph graph = TannerGraph.of(SparseBitMatrix.ofRows(10 * p, rows));
         assertEquals(OptionalInt.of(6), graph.girth());
         assertEquals(0, graph.fourCycles());
+    }
+
+    /**
+     * The LDPC codes of IEEE 802.11-2012 Annex F: three of the twelve have cycles of length 4, in orbits of Z = n/24, as
+     * an independent computation from the standard's tables found; the others have girth 6.
+     */
+    @ParameterizedTest
+    @CsvSource({
+        "648,1/2,0",
+        "648,2/3,0",
+        "648,3/4,2",
+        "648,5/6,0",
+        "1296,1/2,0",
+        "1296,2/3,2",
+        "1296,3/4,0",
+        "1296,5/6,0",
+        "1944,1/2,0",
+        "1944,2/3,1",
+        "1944,3/4,0",
+        "1944,5/6,0"
+    })
+    void wirelessLanCodes(int n, String rate, int orbitsOfFourCycles) {
+        TannerGraph graph = TannerGraph.of(
+                Catalogue.standard().build("ldpc-802.11n:" + n + "," + rate).parityCheck());
+        assertEquals(OptionalInt.of(orbitsOfFourCycles > 0 ? 4 : 6), graph.girth());
+        assertEquals(orbitsOfFourCycles * n / 24, graph.fourCycles());
     }
 }
