@@ -7,7 +7,7 @@ import java.math.BigInteger;
  *
  * @param n length
  * @param k dimension, 1 .. n
- * @param singleton d <= n - k + 1 (R. C. Singleton, IEEE Trans. Inform. Theory 10 (1964))
+ * @param singleton d is at most n - k + 1 (R. C. Singleton, IEEE Trans. Inform. Theory 10 (1964))
  * @param hamming largest d whose spheres fit: sum of C(n, i) for i = 0 .. (d-1)/2 is at most 2^(n-k) (R. W. Hamming, Bell
  *     System Technical Journal 29 (1950)); an even d is held to the (n-1, k) code of distance d - 1 that puncturing leaves
  * @param griesmer largest d with sum of ceil(d / 2^i) for i = 0 .. k-1 at most n (J. H. Griesmer, IBM J. Res. Dev. 4
@@ -18,7 +18,7 @@ public record DistanceBounds(int n, int k, int singleton, int hamming, int gries
     /**
      * The bounds for a length and dimension.
      *
-     * @throws IllegalArgumentException unless 1 <= k <= n
+     * @throws IllegalArgumentException unless k is 1 .. n
      */
     public static DistanceBounds of(int n, int k) {
         if (k < 1 || n < k) {
@@ -46,7 +46,7 @@ public record DistanceBounds(int n, int k, int singleton, int hamming, int gries
         return Math.min(n, Math.max(odd, even));
     }
 
-    /** Largest t <= n with C(n,0) + .. + C(n,t) <= 2^r. */
+    /** Largest t up to n with C(n,0) + .. + C(n,t) at most 2^r. */
     private static int largestRadius(int n, int r) {
         BigInteger room = BigInteger.ONE.shiftLeft(r);
         BigInteger binomial = BigInteger.ONE;

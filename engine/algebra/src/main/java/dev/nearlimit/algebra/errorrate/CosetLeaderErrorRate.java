@@ -6,7 +6,7 @@ import java.math.BigInteger;
  * Frame error rate of complete syndrome decoding: the decoder subtracts the leader of the received word's coset, and is
  * right exactly when the error pattern is that leader. With alpha_w cosets whose leader has weight w, the FER is one
  * minus the sum of alpha_w p^w (1-p)^(n-w) (Slepian, Bell System Technical Journal 35 (1956); MacWilliams and Sloane 1977,
- * ch. 1, theorem 5). It is computed from the complementary counts C(n, w) - alpha_w, so that nothing cancels: relative
+ * ch. 1). It is computed from the complementary counts C(n, w) - alpha_w, so that nothing cancels: relative
  * error below 1e-11 also in the far tail.
  *
  * <p>How ties between several words of least weight in a coset are broken does not matter to the FER.

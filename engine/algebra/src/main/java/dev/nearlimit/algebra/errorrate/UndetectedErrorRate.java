@@ -9,7 +9,7 @@ import java.util.Arrays;
  * within distance t of a codeword other than the sent one. With t = 0 it is that of error detection alone.
  *
  * <p>Around a codeword of weight j, at distance s from it, there are C(j, s-r) C(n-j, r) words of weight j - s + 2r for
- * each r (S. B. Wicker, Error Control Systems, 1995, section 10.3; MacWilliams and Sloane 1977, ch. 1, section 5 for
+ * each r (S. B. Wicker, Error Control Systems, 1995, ch. 10; MacWilliams and Sloane 1977, ch. 1 for
  * t = 0). Counted by weight in exact integers; spheres must not overlap, so 2t is less than the minimum distance. Relative
  * error below 1e-11. The rate need not fall as Eb/N0 rises, so no inverse is offered.
  */

@@ -13,12 +13,12 @@ import java.util.SortedMap;
  * and R = k/n,
  *
  * <pre>
- *   FER <= sum over w of A_w Q(sqrt(2 R w Eb/N0))
- *   BER <= sum over w of (W_w / k) Q(sqrt(2 R w Eb/N0))
+ *   FER &lt;= sum over w of A_w Q(sqrt(2 R w Eb/N0))
+ *   BER &lt;= sum over w of (W_w / k) Q(sqrt(2 R w Eb/N0))
  * </pre>
  *
  * W_w being the total information weight of those words (common practice; Lin and Costello, Error Control Coding, 2nd ed.
- * 2004, section 10.1). They speak of maximum-likelihood decoding and of nothing else: a decoder that is not may do worse.
+ * 2004, ch. 10). They speak of maximum-likelihood decoding and of nothing else: a decoder that is not may do worse.
  * At low Eb/N0 the sums exceed 1 and say nothing.
  *
  * <p>The FER of a complete enumerator is a bound. A sum that leaves weights out is an estimate, and so is the BER where

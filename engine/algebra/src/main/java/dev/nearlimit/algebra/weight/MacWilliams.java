@@ -69,7 +69,7 @@ public final class MacWilliams {
 
     /**
      * Adds factor * K_w(j) to each sum, by the recurrence (w+1) K_(w+1)(j) = (n-2j) K_w(j) - (n-w+1) K_(w-1)(j)
-     * (MacWilliams and Sloane 1977, ch. 5, theorem 19), whose division leaves no remainder. The factor rides along, since
+     * (MacWilliams and Sloane 1977, ch. 5), whose division leaves no remainder. The factor rides along, since
      * the recurrence is linear.
      */
     private static void addKrawtchouk(BigInteger[] sums, int j, BigInteger factor) {

@@ -7,10 +7,10 @@ import java.util.Arrays;
  * Enumerates words of a linear code in Gray order (F. Gray, US patent 2632058, 1953) and adds up, for each weight, the
  * number of words and their message weights.
  *
- * <p>The last {@value #TABLE_BITS} basis words are expanded to a table of all their sums; the other basis words are walked
- * in Gray order, one XOR a step, and every step weighs the whole table against the current sum. Words are kept by plane:
- * word p of every table entry in one array, so that long codes are weighed plane by plane in short loops over small
- * arrays. An inner step has no branch and no allocation.
+ * <p>The first {@value #TABLE_BITS} basis words are expanded to a table of all their sums. The next ones are walked in
+ * Gray order, one XOR a step, and every step weighs the whole table against the current sum; the last ones number the
+ * parts that threads share out. Words are kept by plane: word p of every table entry in one array, so that long codes are
+ * weighed plane by plane in short loops over small arrays. An inner step has no branch and no allocation.
  *
  * <p>One kernel belongs to one thread; the tables are shared.
  */
@@ -43,7 +43,7 @@ final class WordKernel {
     }
 
     /**
-     * Adds the words whose top message bits are {@code part} to the totals.
+     * Adds the words whose last message bits are {@code part} to the totals.
      *
      * @param part which of the {@link Basis#parts()} parts of the code
      * @param counts receives the number of words of each weight, added to what is there

@@ -72,7 +72,7 @@ class WeightEnumerationTest {
                 WeightEnumeration.exact(SmallCodes.extended(SmallCodes.hamming(3))));
     }
 
-    /** MacWilliams and Sloane 1977, ch. 2, fig. 2.14 (extended) and ch. 2, section 6. */
+    /** MacWilliams and Sloane 1977, ch. 2; counts as remembered, an independent enumeration agrees. */
     @Test
     void golayCodes() {
         long[] golay = new long[24];
@@ -88,7 +88,7 @@ class WeightEnumerationTest {
         assertEquals(WeightEnumerator.of(extended), WeightEnumeration.exact(SmallCodes.extended(SmallCodes.golay())));
     }
 
-    /** One word of weight 2^m and 2^(m+1) - 2 of weight 2^(m-1) (MacWilliams and Sloane 1977, ch. 13, section 3). */
+    /** One word of weight 2^m and 2^(m+1) - 2 of weight 2^(m-1) (MacWilliams and Sloane 1977, ch. 13). */
     @ParameterizedTest
     @ValueSource(ints = {2, 3, 5, 7, 9})
     void firstOrderReedMuller(int m) {
