@@ -151,7 +151,7 @@ class HardDecisionDecodersTest {
         }
         int low = pattern & -pattern;
         int carried = pattern + low;
-        return carried | ((pattern ^ carried) / low >>> 2);
+        return carried | (((pattern ^ carried) / low) >>> 2);
     }
 
     private static void expectAllCorrected(Trial trial, String designator) {
