@@ -9,7 +9,7 @@ package dev.nearlimit.numerics.functions;
  * Chebyshev nodes).
  *
  * <p>The absolute error against ln(1 + e^-x) is below {@link #MAX_ERROR} for every x >= 0; beyond 12, where f is below
- * 6.2e-6, the value stays at 6.6e-6. The approximation never rises by more than 1.2e-7, one rounding of its largest
+ * 6.2e-6, the value stays at 4.5e-7. The approximation never rises by more than 1.2e-7, one rounding of its largest
  * value, from one x to a larger one.
  */
 public final class BoxPlusCorrection {
