@@ -3,8 +3,9 @@ package dev.nearlimit.cli.report;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.LinkedHashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
@@ -56,14 +57,17 @@ record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
         return schemes.stream().filter(SchemeEntry::meets).findFirst();
     }
 
-    /** The schemes whose curves are shown at first, by their index in the results. */
+    /**
+     * The schemes whose curves are shown at first, by their index in the results: the best scheme of each of the best
+     * codes, since the same code with another decoder or modulation mostly lies on the same curve.
+     */
     Set<Integer> shownAtFirst() {
-        Set<Integer> shown = new LinkedHashSet<>();
+        Map<String, Integer> bestOfCode = new LinkedHashMap<>();
         for (SchemeEntry scheme : schemes) {
-            if (scheme.hasCurve() && shown.size() < CURVES_AT_FIRST) {
-                shown.add(scheme.index());
+            if (scheme.hasCurve() && bestOfCode.size() < CURVES_AT_FIRST) {
+                bestOfCode.putIfAbsent(scheme.code(), scheme.index());
             }
         }
-        return shown;
+        return Set.copyOf(bestOfCode.values());
     }
 }

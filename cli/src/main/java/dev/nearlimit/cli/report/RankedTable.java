@@ -44,12 +44,6 @@ final class RankedTable {
                     RankedTable::writeOperations),
             new Column(
                     "",
-                    "Un\u00addetected FER, at most",
-                    "number",
-                    s -> raw(s.number("uerUpper")),
-                    quantity("uerUpper", Quantities::errorRate)),
-            new Column(
-                    "",
                     "How obtained",
                     "obtained",
                     s -> Fields.text(s.node(), "neededMethod").orElse(""),
@@ -97,9 +91,9 @@ final class RankedTable {
                 .filter(column -> ranked.stream()
                         .anyMatch(s -> !column.sortValue().apply(s).isEmpty()))
                 .toList();
+        html.element("p", "Press a heading to sort by it; press again to turn the order.", "class", "hint");
         html.open("div", "class", "scroll", "tabindex", "0", "role", "region", "aria-label", "Ranked schemes");
         html.open("table", "class", "ranked sortable");
-        html.element("caption", "Ranked schemes. Press a heading to sort by it; press again to turn the order.");
         writeHeadings(columns, html);
         html.open("tbody");
         for (SchemeEntry scheme : ranked) {
@@ -181,7 +175,7 @@ final class RankedTable {
         if (scheme.tiedWithBest()) {
             html.element(
                     "span",
-                    "tied with best",
+                    "tied",
                     "class",
                     "detail",
                     "title",
@@ -241,6 +235,16 @@ final class RankedTable {
     private static void writeObtained(SchemeEntry scheme, Markup html) {
         html.text(Fields.text(scheme.node(), "neededMethod").orElse(Quantities.NONE));
         Fields.text(scheme.node(), "neededHow").ifPresent(how -> html.element("span", how, "class", "detail"));
+        OptionalDouble undetected = scheme.number("uerUpper");
+        if (undetected.isPresent()) {
+            html.element(
+                    "span",
+                    "UER\u00a0\u2264\u00a0" + Quantities.errorRate(undetected),
+                    "class",
+                    "detail",
+                    "title",
+                    "Undetected frame error rate: upper end of its interval");
+        }
     }
 
     private static String raw(OptionalDouble value) {

@@ -9,9 +9,9 @@ import java.util.function.DoubleFunction;
 /** What the link demands, and the link budget of each operating point. */
 final class RequirementSection {
     private static final Map<String, Demand> KNOWN = Map.ofEntries(
-            known("bandwidthHz", "Bandwidth", Quantities::hertz),
+            known("bandwidthHz", "Bandwidth", hz -> Quantities.stated(hz, "Hz")),
             known("rollOff", "Roll-off of the pulse", Quantities::significant),
-            known("bitRateBps", "Information bit rate", Quantities::bitsPerSecond),
+            known("bitRateBps", "Information bit rate", bps -> Quantities.stated(bps, "bit/s")),
             known("cOverN0DbHz", "Carrier-to-noise density C/N0", db -> Quantities.decibels(db) + " dBHz"),
             known("availableEbn0Db", "Available Eb/N0", db -> Quantities.decibels(db) + " dB"),
             known("payloadBits", "Payload", bits -> Quantities.count(bits) + " bits"),

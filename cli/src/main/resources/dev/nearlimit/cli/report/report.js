@@ -33,6 +33,12 @@
     normalApproximationDb: "finite length (est.)", finiteLengthDb: "finite length", converseDb: "finite length"
   };
 
+  const CAPACITIES = [
+    { field: "shannonEfficiency", name: "Shannon, any input", dash: [] },
+    { field: "binaryInputEfficiency", name: "binary input, soft decisions", dash: [7, 3] },
+    { field: "hardDecisionEfficiency", name: "binary input, hard decisions", dash: [2, 3] }
+  ];
+
   const SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
   function power(exponent) {
@@ -177,18 +183,31 @@
       + '" stroke-width="0.35"/></svg>';
   }
 
+  function lineSwatch(dash, colour) {
+    return '<svg width="34" height="14" viewBox="-17 -7 34 14"><path d="M-17,0H17" stroke="' + colour
+      + '" stroke-width="1.5" stroke-dasharray="' + dash.join(" ") + '"/></svg>';
+  }
+
   Charts.prototype.drawSwatches = function () {
     this.boxes.forEach(function (box) {
       const index = Number(box.value);
       box.parentNode.querySelector(".swatch").innerHTML = swatch(this.marker(index), this.colour(index), true, true);
     }, this);
-    const list = this.container.querySelector(".families");
-    list.textContent = "";
-    this.families.forEach(function (family, i) {
+    const list = this.container.querySelector(".key");
+    const add = function (picture, name) {
       const item = document.createElement("li");
-      item.innerHTML = swatch(MARKERS[i % MARKERS.length], this.palette.soft, true, false);
-      item.appendChild(document.createTextNode(family));
+      item.innerHTML = picture;
+      item.appendChild(document.createTextNode(name));
       list.appendChild(item);
+    };
+    list.textContent = "";
+    CAPACITIES.forEach(function (capacity) {
+      if (((this.point.curves || {})[capacity.field] || []).length > 0) {
+        add(lineSwatch(capacity.dash, this.palette.ink), capacity.name);
+      }
+    }, this);
+    this.families.forEach(function (family, i) {
+      add(swatch(MARKERS[i % MARKERS.length], this.palette.soft, true, false), family);
     }, this);
   };
 
@@ -197,7 +216,7 @@
     const common = {
       nameLocation: "middle",
       nameTextStyle: { color: p.ink, fontSize: 13 },
-      axisLine: { show: true, lineStyle: { color: p.soft } },
+      axisLine: { show: true, onZero: false, lineStyle: { color: p.soft } },
       axisTick: { show: true, lineStyle: { color: p.soft } },
       axisLabel: { color: p.ink, fontSize: 12 },
       splitLine: { show: true, lineStyle: { color: p.grid } }
@@ -304,11 +323,13 @@
     axes.x.max = range.xMax;
     const option = this.base(axes, rules);
     option.series = [];
+    const ends = [];
     shown.forEach(function (index) {
       rates.forEach(function (rate) {
-        this.addCurve(option.series, index, rate, range, choice === "both");
+        this.addCurve(option.series, ends, index, rate, range, choice === "both");
       }, this);
     }, this);
+    this.addEndLabels(option.series, ends, range);
     this.addUncoded(option.series, range);
     option.series.push(this.targetSeries(targets));
     option.series.push(this.ruleSeries(rules));
@@ -364,7 +385,7 @@
     };
   };
 
-  Charts.prototype.addCurve = function (series, index, rate, range, both) {
+  Charts.prototype.addCurve = function (series, ends, index, rate, range, both) {
     const colour = this.colour(index);
     const marker = "path://" + this.marker(index);
     const key = this.keys[index];
@@ -379,7 +400,7 @@
         type: "line", symbol: "none", z: 2, lineStyle: { color: colour, width: hollow ? 1.2 : 2 }, data: exact,
         tooltip: { formatter: label + "<br>exact " + rate.toUpperCase() }
       });
-      series.push(this.endLabel(exact[exact.length - 1], end, colour));
+      ends.push({ place: exact[exact.length - 1], label: end });
     }
     const measured = this.measured(index, rate);
     if (measured.length === 0) { return; }
@@ -400,7 +421,7 @@
     });
     if (seen.length > 0 && exact.length === 0) {
       const last = seen[seen.length - 1];
-      series.push(this.endLabel([last.ebn0Db, last[rate]], end, colour));
+      ends.push({ place: [last.ebn0Db, last[rate]], label: end });
     }
     series.push(this.errorBars(measured, rate, colour, range));
     const none = measured.filter(function (m) { return m[rate] === 0 && m[rate + "High"] > 0; });
@@ -412,7 +433,21 @@
     });
   };
 
-  // The scheme's key at the end of its curve, moved aside where another stands.
+  // A curve's key stands at its right end, or at its left where another curve ends close by on the right.
+  Charts.prototype.addEndLabels = function (series, ends, range) {
+    const nearby = function (from, to) {
+      const distance = to.place[0] - from.place[0];
+      return distance >= 0 && distance < 0.05 * (range.xMax - range.xMin)
+        && Math.abs(Math.log10(to.place[1] / from.place[1])) < 0.5;
+    };
+    ends.forEach(function (end) {
+      const others = ends.filter(function (other) { return other !== end; });
+      const right = others.some(function (other) { return nearby(end, other); });
+      const left = others.some(function (other) { return nearby(other, end); });
+      series.push(this.endLabel(end.place, Object.assign({}, end.label, { position: right && !left ? "left" : "right" })));
+    }, this);
+  };
+
   Charts.prototype.endLabel = function (place, label) {
     return {
       type: "scatter", silent: true, symbolSize: 1, itemStyle: { color: "transparent" }, data: [place], z: 5,
@@ -451,9 +486,10 @@
     const inside = uncoded.filter(function (u) { return u[0] >= range.xMin && u[0] <= range.xMax && u[1] >= range.yMin; });
     if (inside.length === 0) { return; }
     const last = inside[inside.length - 1];
+    const atEdge = last[0] > range.xMax - 0.2 * (range.xMax - range.xMin);
     series.push(this.endLabel(last, {
-      show: true, position: last[0] > range.xMax - 1.5 ? "top" : "right", align: last[0] > range.xMax - 1.5 ? "right" : "left",
-      formatter: "uncoded BER", color: p.soft, fontSize: 12
+      show: true, position: atEdge ? [0, -16] : "right", align: atEdge ? "right" : "left", formatter: "uncoded BER",
+      color: p.soft, fontSize: 12
     }));
   };
 
@@ -469,8 +505,8 @@
           children: [
             { type: "line", shape: { x1: area.x, y1: y, x2: area.x + area.width, y2: y },
               style: { stroke: p.good, lineWidth: 1.4, lineDash: [4, 3] } },
-            { type: "text", style: { x: area.x + area.width - 6, y: y + 9, text: targets[params.dataIndex].name,
-              fill: p.good, font: "12px system-ui, sans-serif", textAlign: "right", textVerticalAlign: "middle",
+            { type: "text", style: { x: area.x + 6, y: y + 9, text: targets[params.dataIndex].name,
+              fill: p.good, font: "12px system-ui, sans-serif", textAlign: "left", textVerticalAlign: "middle",
               stroke: p.sheet, lineWidth: 3 } }
           ]
         };
@@ -499,30 +535,18 @@
     axes.x.max = xMax;
     const option = this.base(axes, rules);
     option.series = [];
-    [["shannonEfficiency", "Shannon, any input", "solid", p.ink],
-      ["binaryInputEfficiency", "binary input, soft decisions", [7, 3], p.ink],
-      ["hardDecisionEfficiency", "binary input, hard decisions", [2, 3], p.ink]].forEach(function (curve) {
-      this.addCapacity(option.series, curves[curve[0]], curve[1], curve[2], curve[3], axes);
-    }, this);
+    CAPACITIES.forEach(function (capacity) { this.addCapacity(option.series, curves[capacity.field], capacity.dash); }, this);
     placed.forEach(function (s) { this.addPlace(option.series, s.scheme, s.index); }, this);
     option.series.push(this.ruleSeries(rules));
     this.efficiency.setOption(option, true);
   };
 
-  Charts.prototype.addCapacity = function (series, data, name, dash, colour, axes) {
+  Charts.prototype.addCapacity = function (series, data, dash) {
     if (!data || data.length === 0) { return; }
-    const p = this.palette;
     series.push({
-      type: "line", symbol: "none", silent: true, z: 1, data: data, lineStyle: { color: colour, width: 1.5, type: dash }
+      type: "line", symbol: "none", silent: true, z: 1, data: data,
+      lineStyle: { color: this.palette.ink, width: 1.5, type: dash.length > 0 ? dash : "solid" }
     });
-    // The name stands along the curve, where the curve leaves the middle of the plot.
-    const inside = data.filter(function (d) { return d[0] <= axes.x.max && d[1] <= axes.y.max; });
-    const last = inside[inside.length - 1];
-    if (!last) { return; }
-    series.push(this.endLabel(last, {
-      show: true, formatter: name, color: p.ink, fontSize: 12, distance: 5,
-      position: last[0] > axes.x.max - 3 ? "left" : "right"
-    }));
   };
 
   Charts.prototype.addPlace = function (series, scheme, index) {
@@ -539,7 +563,7 @@
     }
     series.push({
       type: "scatter", z: 3, symbol: "path://" + this.marker(index), symbolSize: 13, symbolKeepAspect: true,
-      itemStyle: { color: scheme.meets ? colour : p.sheet, borderColor: colour, borderWidth: 1.8 },
+      itemStyle: { color: scheme.meets ? colour : p.sheet, borderColor: colour, borderWidth: 1.8, opacity: 1 },
       data: [place],
       label: {
         show: true, formatter: this.keys[index], position: "right", distance: 4, color: colour, fontSize: 12,
@@ -564,11 +588,13 @@
 
   follow();
   dark.addEventListener("change", follow);
-  let pending = 0;
-  window.addEventListener("resize", function () {
-    window.clearTimeout(pending);
-    pending = window.setTimeout(function () { all.forEach(function (charts) { charts.resize(); }); }, 100);
+  const widths = new ResizeObserver(function (entries) {
+    entries.forEach(function (entry) {
+      all.filter(function (charts) { return charts.container === entry.target; })
+        .forEach(function (charts) { charts.resize(); });
+    });
   });
+  all.forEach(function (charts) { widths.observe(charts.container); });
   window.addEventListener("beforeprint", function () {
     drawAll(LIGHT);
     all.forEach(function (charts) { charts.resize(); });
