@@ -11,6 +11,7 @@ import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 
 /**
  * Draws the results of a shortlist as one self-contained HTML page: answer, requirement and link budget, ranked table,
@@ -20,6 +21,16 @@ import java.util.Map;
  */
 public final class HtmlReport {
     private static final String CHART_LIBRARY = "/META-INF/resources/webjars/echarts/5.3.1/dist/echarts.min.js";
+
+    /** The page's own scripts, in the order in which they build on each other. */
+    private static final List<String> SCRIPTS = List.of(
+            "text.js",
+            "sorting.js",
+            "appearance.js",
+            "chart-frame.js",
+            "error-rate-chart.js",
+            "efficiency-chart.js",
+            "page.js");
 
     private HtmlReport() {}
 
@@ -67,7 +78,10 @@ public final class HtmlReport {
                         "main", main(results, requirement, points, name),
                         "results", embeddable(results),
                         "chart-library", withoutEndTags(PageTemplate.resource(CHART_LIBRARY)),
-                        "script", withoutEndTags(PageTemplate.resource("report.js"))));
+                        "scripts",
+                                withoutEndTags(SCRIPTS.stream()
+                                        .map(PageTemplate::resource)
+                                        .collect(Collectors.joining("\n")))));
     }
 
     private static String main(JsonNode results, JsonNode requirement, List<OperatingPoint> points, String name) {

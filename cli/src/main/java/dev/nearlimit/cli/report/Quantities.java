@@ -38,7 +38,7 @@ final class Quantities {
         }
         BigDecimal rounded = new BigDecimal(rate).round(new MathContext(2));
         if (rate >= 0.01) {
-            return rounded.toPlainString();
+            return rounded.stripTrailingZeros().toPlainString();
         }
         int exponent = rounded.precision() - rounded.scale() - 1;
         String mantissa =
