@@ -1,7 +1,6 @@
 package dev.nearlimit.codes;
 
 import dev.nearlimit.codes.gf2.BitMatrix;
-import java.util.Arrays;
 
 /**
  * Encodes with a generator matrix that carries information bit i unchanged at position {@code informationPositions[i]}:
@@ -28,20 +27,9 @@ final class SystematicEncoder implements Encoder {
         for (int position = 0; position < n; position++) {
             if (!isInformation[position]) {
                 parityPositions[next] = position;
-                sourcesOfParity[next++] = ones(columns, position);
+                sourcesOfParity[next++] = columns.onesOfRow(position);
             }
         }
-    }
-
-    private static int[] ones(BitMatrix matrix, int row) {
-        int[] found = new int[matrix.columns()];
-        int count = 0;
-        for (int c = 0; c < matrix.columns(); c++) {
-            if (matrix.get(row, c)) {
-                found[count++] = c;
-            }
-        }
-        return Arrays.copyOf(found, count);
     }
 
     @Override

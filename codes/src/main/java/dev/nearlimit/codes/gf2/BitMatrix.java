@@ -110,6 +110,18 @@ public final class BitMatrix {
         return words[row * wordsPerRow + word];
     }
 
+    /** The ascending column numbers of a row's ones. */
+    public int[] onesOfRow(int row) {
+        int[] found = new int[rowWeight(row)];
+        int next = 0;
+        for (int w = 0; w < wordsPerRow; w++) {
+            for (long rest = words[row * wordsPerRow + w]; rest != 0; rest &= rest - 1) {
+                found[next++] = (w << 6) + Long.numberOfTrailingZeros(rest);
+            }
+        }
+        return found;
+    }
+
     /** XORs a row of this matrix into {@code target}, which has at least {@link #wordsPerRow()} words. */
     public void xorRowInto(int row, long[] target) {
         Objects.checkIndex(row, rows);
@@ -127,6 +139,27 @@ public final class BitMatrix {
         int to = target * wordsPerRow;
         for (int w = 0; w < wordsPerRow; w++) {
             words[to + w] ^= words[from + w];
+        }
+    }
+
+    /** The first row from {@code fromRow} on with a 1 in {@code column}; -1 if there is none. */
+    int firstRowWithOne(int fromRow, int column) {
+        long mask = 1L << (column & 63);
+        for (int r = fromRow; r < rows; r++) {
+            if ((words[r * wordsPerRow + (column >> 6)] & mask) != 0) {
+                return r;
+            }
+        }
+        return -1;
+    }
+
+    /** Adds row {@code pivot} to every other row that has a 1 in {@code column}. */
+    void clearColumn(int pivot, int column) {
+        long mask = 1L << (column & 63);
+        for (int r = 0; r < rows; r++) {
+            if (r != pivot && (words[r * wordsPerRow + (column >> 6)] & mask) != 0) {
+                addRow(pivot, r);
+            }
         }
     }
 
