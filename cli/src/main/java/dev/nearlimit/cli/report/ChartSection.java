@@ -22,7 +22,7 @@ final class ChartSection {
                 html,
                 "error-rates",
                 "Error rate against Eb/N0 on a logarithmic axis, with 95 % intervals as error bars. Figures at the curves"
-                        + " are the schemes' places in the table. Rates are per codeword. A triangle that points down is an"
+                        + " are the schemes' marks in the table. Rates are per codeword. A triangle that points down is an"
                         + " upper bound: no error was seen there.");
         writeControls(point, html);
         html.closeLine();

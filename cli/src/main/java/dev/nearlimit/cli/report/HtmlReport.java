@@ -3,11 +3,8 @@ package dev.nearlimit.cli.report;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
-import java.io.IOException;
-import java.nio.file.AtomicMoveNotSupportedException;
-import java.nio.file.Files;
+import dev.nearlimit.cli.output.OutputFile;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -35,27 +32,14 @@ public final class HtmlReport {
     private HtmlReport() {}
 
     /**
-     * Writes the page. It is written beside the target first and renamed when whole, so that a failure leaves no half
-     * page and an earlier page stays as it was.
+     * Writes the page, whole or not at all.
      *
      * @param results the results of the shortlist command, with Eb/N0 in dB, as the JSON contract has them
      * @param target where the page goes; its folder must exist, and a file that is there already is replaced
-     * @throws IOException if the page cannot be written there
+     * @throws dev.nearlimit.cli.failure.InputException if the page cannot be written there
      */
-    public static void write(JsonNode results, Path target) throws IOException {
-        Path whole = target.toAbsolutePath();
-        Path partial = whole.resolveSibling(
-                "." + whole.getFileName() + "." + ProcessHandle.current().pid() + ".partial");
-        try {
-            Files.writeString(partial, render(results));
-            try {
-                Files.move(partial, whole, StandardCopyOption.ATOMIC_MOVE);
-            } catch (AtomicMoveNotSupportedException e) {
-                Files.move(partial, whole, StandardCopyOption.REPLACE_EXISTING);
-            }
-        } finally {
-            Files.deleteIfExists(partial);
-        }
+    public static void write(JsonNode results, Path target) {
+        OutputFile.write(target, render(results));
     }
 
     /**
@@ -90,6 +74,16 @@ public final class HtmlReport {
         html.element("h1", name);
         Fields.text(requirement, "description").ifPresent(text -> html.element("p", text, "class", "description"));
         html.closeLine();
+        if (!results.path("complete").asBoolean(true)) {
+            html.element(
+                    "p",
+                    "Incomplete: the run was interrupted, and this is what it had found by then. Schemes may be missing, and"
+                            + " ranks may change.",
+                    "class",
+                    "incomplete",
+                    "role",
+                    "note");
+        }
         boolean several = points.size() > 1;
         html.open("section", "id", "answer");
         html.element("h2", several ? "Answers" : "Answer");

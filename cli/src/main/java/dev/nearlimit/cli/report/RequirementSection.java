@@ -9,7 +9,7 @@ import java.util.function.DoubleFunction;
 /** What the link demands, and the link budget of each operating point. */
 final class RequirementSection {
     private static final Map<String, Demand> KNOWN = Map.ofEntries(
-            known("bandwidthHz", "Bandwidth", hz -> Quantities.stated(hz, "Hz")),
+            known("bandwidthHz", "Occupied bandwidth, at most", hz -> Quantities.stated(hz, "Hz")),
             known("rollOff", "Roll-off of the pulse", Quantities::significant),
             known("bitRateBps", "Information bit rate", bps -> Quantities.stated(bps, "bit/s")),
             known("cOverN0DbHz", "Carrier-to-noise density C/N0", db -> Quantities.decibels(db) + " dBHz"),
@@ -19,7 +19,10 @@ final class RequirementSection {
             known("ber", "Bit error rate, at most", Quantities::errorRate),
             known("undetectedErrorRate", "Undetected frame error rate, at most", Quantities::errorRate),
             known("latencyS", "Latency, at most", Quantities::seconds),
-            known("operationsPerBit", "Decoder operations per information bit, at most", Quantities::significant),
+            known(
+                    "operationsPerBit",
+                    "Decoder operations per information bit, worst case, at most",
+                    Quantities::significant),
             known("memoryBits", "Decoder memory, at most", bits -> Quantities.count(bits) + " bits"));
 
     private RequirementSection() {}
