@@ -8,7 +8,7 @@ import java.util.OptionalDouble;
 
 /** The answer for one operating point, in two sentences: which scheme, what it needs, what is left, what it beats. */
 final class AnswerSection {
-    private static final int SCHEMES_NAMED_AS_BEATEN = 2;
+    private static final int SCHEMES_NAMED = 2;
     private static final int FAILURES_NAMED = 3;
 
     private final JsonNode requirement;
@@ -140,43 +140,48 @@ final class AnswerSection {
     }
 
     private void writeBeaten(SchemeEntry winner, String start) {
-        List<SchemeEntry> tied = point.schemes().stream()
-                .filter(scheme -> scheme.index() != winner.index() && scheme.tiedWithBest())
-                .toList();
-        List<SchemeEntry> next = point.ranked().stream()
-                .filter(scheme -> scheme.index() != winner.index() && !scheme.tiedWithBest())
-                .limit(SCHEMES_NAMED_AS_BEATEN)
-                .toList();
-        if (next.isEmpty() && tied.isEmpty()) {
-            html.text(start.startsWith(",") ? "." : "");
-            return;
-        }
+        List<SchemeEntry> others = others(winner);
+        List<SchemeEntry> tied =
+                others.stream().filter(SchemeEntry::tiedWithBest).toList();
+        List<SchemeEntry> next =
+                others.stream().filter(scheme -> !scheme.tiedWithBest()).toList();
+        boolean continues = start.startsWith(",");
         if (!next.isEmpty()) {
             html.text(start + " before ");
-            writeNames(next);
+            writeNames(next.subList(0, Math.min(next.size(), SCHEMES_NAMED)));
         }
         if (!tied.isEmpty()) {
             html.text(
-                    next.isEmpty()
-                            ? (start.startsWith(",") ? ", tied with " : "It is tied with ")
-                            : "; tied with it: ");
-            writeNames(tied);
+                    continues || !next.isEmpty()
+                            ? "; its interval overlaps that of "
+                            : "Its interval overlaps that of ");
+            writeNames(tied.subList(0, Math.min(tied.size(), SCHEMES_NAMED)));
+            html.text(tied.size() > SCHEMES_NAMED ? " and of others" : "");
         }
-        html.text(".");
+        html.text(continues || !others.isEmpty() ? "." : "");
+    }
+
+    /** The schemes behind the winner, one for each code with its decoder: the same over another modulation is no rival. */
+    private List<SchemeEntry> others(SchemeEntry winner) {
+        List<SchemeEntry> others = new ArrayList<>();
+        for (SchemeEntry scheme : point.placed()) {
+            if (!scheme.sameCodeAndDecoder(winner) && others.stream().noneMatch(scheme::sameCodeAndDecoder)) {
+                others.add(scheme);
+            }
+        }
+        return others;
     }
 
     private void writeNames(List<SchemeEntry> schemes) {
         for (int i = 0; i < schemes.size(); i++) {
             SchemeEntry scheme = schemes.get(i);
             html.text(i == 0 ? "" : i == schemes.size() - 1 ? " and " : ", ");
-            html.designator(scheme.code());
+            html.designator(scheme.code()).text(" by ").designator(decoderName(scheme));
             OptionalDouble needed = scheme.number("neededEbn0Db");
-            html.text(" by ").designator(decoderName(scheme));
-            html.text(
-                    needed.isPresent()
-                            ? " (" + Quantities.decibels(needed) + " dB"
-                                    + (scheme.meets() ? "" : ", fails the requirement") + ")"
-                            : "");
+            if (needed.isPresent()) {
+                html.text(" (" + Quantities.decibels(needed) + "\u00a0dB"
+                        + (scheme.meets() ? "" : ", fails the requirement") + ")");
+            }
         }
     }
 

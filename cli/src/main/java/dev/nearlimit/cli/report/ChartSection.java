@@ -22,7 +22,7 @@ final class ChartSection {
                 html,
                 "error-rates",
                 "Error rate against Eb/N0 on a logarithmic axis, with 95 % intervals as error bars. Figures at the curves"
-                        + " are the schemes' places in the table. Rates are per codeword. A triangle that points down is an"
+                        + " are the schemes' marks in the table. Rates are per codeword. A triangle that points down is an"
                         + " upper bound: no error was seen there.");
         writeControls(point, html);
         html.closeLine();
@@ -33,7 +33,7 @@ final class ChartSection {
                 "What each scheme carries per real dimension against the Eb/N0 that it needs, with what the channel"
                         + " allows. A filled marker meets every demand, a hollow one fails; the shape tells the family."
                         + " Schemes without a needed Eb/N0 have no marker.");
-        html.open("ul", "class", "families", "aria-label", "Marker shapes of the code families");
+        html.open("ul", "class", "key", "aria-label", "Lines and marker shapes");
         html.close();
         html.closeLine();
     }
@@ -61,7 +61,7 @@ final class ChartSection {
         html.close().closeLine();
         html.open("fieldset", "class", "legend").element("legend", "Schemes");
         html.open("p", "class", "pick");
-        html.element("button", "first five", "type", "button", "data-pick", "first");
+        html.element("button", "best of each code", "type", "button", "data-pick", "first");
         html.element("button", "all", "type", "button", "data-pick", "all");
         html.element("button", "none", "type", "button", "data-pick", "none");
         html.close();

@@ -3,14 +3,12 @@ package dev.nearlimit.cli.report;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
-import java.io.IOException;
-import java.nio.file.AtomicMoveNotSupportedException;
-import java.nio.file.Files;
+import dev.nearlimit.cli.output.OutputFile;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 
 /**
  * Draws the results of a shortlist as one self-contained HTML page: answer, requirement and link budget, ranked table,
@@ -21,30 +19,27 @@ import java.util.Map;
 public final class HtmlReport {
     private static final String CHART_LIBRARY = "/META-INF/resources/webjars/echarts/5.3.1/dist/echarts.min.js";
 
+    /** The page's own scripts, in the order in which they build on each other. */
+    private static final List<String> SCRIPTS = List.of(
+            "text.js",
+            "sorting.js",
+            "appearance.js",
+            "chart-frame.js",
+            "error-rate-chart.js",
+            "efficiency-chart.js",
+            "page.js");
+
     private HtmlReport() {}
 
     /**
-     * Writes the page. It is written beside the target first and renamed when whole, so that a failure leaves no half
-     * page and an earlier page stays as it was.
+     * Writes the page, whole or not at all.
      *
      * @param results the results of the shortlist command, with Eb/N0 in dB, as the JSON contract has them
      * @param target where the page goes; its folder must exist, and a file that is there already is replaced
-     * @throws IOException if the page cannot be written there
+     * @throws dev.nearlimit.cli.failure.InputException if the page cannot be written there
      */
-    public static void write(JsonNode results, Path target) throws IOException {
-        Path whole = target.toAbsolutePath();
-        Path partial = whole.resolveSibling(
-                "." + whole.getFileName() + "." + ProcessHandle.current().pid() + ".partial");
-        try {
-            Files.writeString(partial, render(results));
-            try {
-                Files.move(partial, whole, StandardCopyOption.ATOMIC_MOVE);
-            } catch (AtomicMoveNotSupportedException e) {
-                Files.move(partial, whole, StandardCopyOption.REPLACE_EXISTING);
-            }
-        } finally {
-            Files.deleteIfExists(partial);
-        }
+    public static void write(JsonNode results, Path target) {
+        OutputFile.write(target, render(results));
     }
 
     /**
@@ -67,7 +62,10 @@ public final class HtmlReport {
                         "main", main(results, requirement, points, name),
                         "results", embeddable(results),
                         "chart-library", withoutEndTags(PageTemplate.resource(CHART_LIBRARY)),
-                        "script", withoutEndTags(PageTemplate.resource("report.js"))));
+                        "scripts",
+                                withoutEndTags(SCRIPTS.stream()
+                                        .map(PageTemplate::resource)
+                                        .collect(Collectors.joining("\n")))));
     }
 
     private static String main(JsonNode results, JsonNode requirement, List<OperatingPoint> points, String name) {
@@ -76,6 +74,16 @@ public final class HtmlReport {
         html.element("h1", name);
         Fields.text(requirement, "description").ifPresent(text -> html.element("p", text, "class", "description"));
         html.closeLine();
+        if (!results.path("complete").asBoolean(true)) {
+            html.element(
+                    "p",
+                    "Incomplete: the run was interrupted, and this is what it had found by then. Schemes may be missing, and"
+                            + " ranks may change.",
+                    "class",
+                    "incomplete",
+                    "role",
+                    "note");
+        }
         boolean several = points.size() > 1;
         html.open("section", "id", "answer");
         html.element("h2", several ? "Answers" : "Answer");

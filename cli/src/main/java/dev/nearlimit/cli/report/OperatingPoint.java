@@ -3,8 +3,9 @@ package dev.nearlimit.cli.report;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.LinkedHashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
@@ -13,7 +14,7 @@ import java.util.Set;
  *
  * @param index its place in the results
  * @param node its fields
- * @param schemes the ranked schemes in rank order, then the others as they stand
+ * @param schemes the ranked schemes in rank order, then the others as they stand, the nearest first
  */
 record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
     /** How many curves the error-rate chart shows before the reader picks others: more would hide each other. */
@@ -27,7 +28,7 @@ record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
             if (scheme.path("rank").isNumber()) {
                 ranked.add(new SchemeEntry(scheme.path("rank").asText(), i, scheme));
             } else {
-                others.add(new SchemeEntry("d" + (others.size() + 1), i, scheme));
+                others.add(new SchemeEntry("f" + (others.size() + 1), i, scheme));
             }
             i++;
         }
@@ -40,14 +41,15 @@ record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
         return Fields.text(node, "name").orElse("Operating point " + (index + 1));
     }
 
-    List<SchemeEntry> ranked() {
-        return schemes.stream().filter(SchemeEntry::ranked).toList();
+    /** Schemes with a rank, then those that fail but have an Eb/N0 that they need. */
+    List<SchemeEntry> placed() {
+        return schemes.stream().filter(SchemeEntry::placed).toList();
     }
 
-    /** Schemes that fail a demand or were dropped before they had a rank. */
+    /** Schemes that fail a demand or were dropped before anything was found. */
     List<SchemeEntry> rejected() {
         return schemes.stream()
-                .filter(scheme -> !scheme.meets() || !scheme.ranked())
+                .filter(scheme -> !scheme.meets() || !scheme.placed())
                 .toList();
     }
 
@@ -56,14 +58,17 @@ record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
         return schemes.stream().filter(SchemeEntry::meets).findFirst();
     }
 
-    /** The schemes whose curves are shown at first, by their index in the results. */
+    /**
+     * The schemes whose curves are shown at first, by their index in the results: the best scheme of each of the best
+     * codes, since the same code with another decoder or modulation mostly lies on the same curve.
+     */
     Set<Integer> shownAtFirst() {
-        Set<Integer> shown = new LinkedHashSet<>();
+        Map<String, Integer> bestOfCode = new LinkedHashMap<>();
         for (SchemeEntry scheme : schemes) {
-            if (scheme.hasCurve() && shown.size() < CURVES_AT_FIRST) {
-                shown.add(scheme.index());
+            if (scheme.hasCurve() && bestOfCode.size() < CURVES_AT_FIRST) {
+                bestOfCode.putIfAbsent(scheme.code(), scheme.index());
             }
         }
-        return shown;
+        return Set.copyOf(bestOfCode.values());
     }
 }

@@ -2,6 +2,7 @@ package dev.nearlimit.cli.report;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.Locale;
 import java.util.OptionalDouble;
 
@@ -37,7 +38,7 @@ final class Quantities {
         }
         BigDecimal rounded = new BigDecimal(rate).round(new MathContext(2));
         if (rate >= 0.01) {
-            return rounded.toPlainString();
+            return rounded.stripTrailingZeros().toPlainString();
         }
         int exponent = rounded.precision() - rounded.scale() - 1;
         String mantissa =
@@ -51,14 +52,22 @@ final class Quantities {
         return rate.isPresent() ? errorRate(rate.getAsDouble()) : NONE;
     }
 
-    /** A frequency in Hz, kHz, MHz or GHz. */
+    /** A frequency in Hz, kHz, MHz or GHz, to three significant digits. */
     static String hertz(double hz) {
-        return scaled(hz, "Hz");
+        Scale scale = Scale.of(hz);
+        double scaled = hz / scale.factor();
+        double size = Math.abs(scaled);
+        int decimals = size >= 100 ? 0 : size >= 10 ? 1 : 2;
+        String digits =
+                String.format(Locale.ROOT, "%." + decimals + "f", scaled).replace("-", MINUS);
+        return digits + " " + scale.prefix() + "Hz";
     }
 
-    /** A bit rate in bit/s, kbit/s and so on. */
-    static String bitsPerSecond(double bps) {
-        return scaled(bps, "bit/s");
+    /** A quantity that somebody stated, with all the digits they gave, scaled to k, M or G of its unit. */
+    static String stated(double value, String unit) {
+        Scale scale = Scale.of(value);
+        BigDecimal scaled = BigDecimal.valueOf(value).divide(BigDecimal.valueOf(scale.factor()));
+        return scaled.stripTrailingZeros().toPlainString().replace("-", MINUS) + " " + scale.prefix() + unit;
     }
 
     /** A time in s, ms, \u00b5s or ns. */
@@ -76,7 +85,7 @@ final class Quantities {
     /** A whole number with its thousands set apart. */
     static String count(double value) {
         String digits = new BigDecimal(value)
-                .setScale(0, java.math.RoundingMode.HALF_UP)
+                .setScale(0, RoundingMode.HALF_UP)
                 .toPlainString()
                 .replace("-", MINUS);
         return groupThousands(digits);
@@ -97,15 +106,18 @@ final class Quantities {
         return digits;
     }
 
-    private static String scaled(double value, String unit) {
-        double size = Math.abs(value);
-        if (size >= 1e9) {
-            return significant(value / 1e9) + " G" + unit;
+    /** A decimal prefix. */
+    private record Scale(double factor, String prefix) {
+        static Scale of(double value) {
+            double size = Math.abs(value);
+            if (size >= 1e9) {
+                return new Scale(1e9, "G");
+            }
+            if (size >= 1e6) {
+                return new Scale(1e6, "M");
+            }
+            return size >= 1e3 ? new Scale(1e3, "k") : new Scale(1, "");
         }
-        if (size >= 1e6) {
-            return significant(value / 1e6) + " M" + unit;
-        }
-        return size >= 1e3 ? significant(value / 1e3) + " k" + unit : significant(value) + " " + unit;
     }
 
     private static String groupThousands(String digits) {

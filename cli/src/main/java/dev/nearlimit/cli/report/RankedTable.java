@@ -13,7 +13,7 @@ import java.util.function.Function;
  */
 final class RankedTable {
     private static final List<Column> COLUMNS = List.of(
-            new Column("", "#", "rank", s -> raw(s.number("rank")), (s, html) -> html.text(s.key())),
+            new Column("", "#", "rank", RankedTable::order, (s, html) -> html.text(s.key())),
             new Column("", "Scheme", "scheme", s -> s.code() + " " + s.decoder(), RankedTable::writeScheme),
             new Column("", "Verdict", "verdict", s -> s.meets() ? "0" : "1", RankedTable::writeVerdict),
             new Column("", "Needed Eb/N0 [dB]", "number", s -> raw(s.number("neededEbn0Db")), RankedTable::writeNeeded),
@@ -23,7 +23,7 @@ final class RankedTable {
             decibels("Gap [dB] to the limit", "Modula\u00adtion", "gapToModulationLimitDb", null),
             decibels("Gap [dB] to the limit", "Hard decision", "gapToHardDecisionLimitDb", null),
             decibels("Gap [dB] to the limit", "Finite length", "gapToFiniteLengthDb", "gapToFiniteLengthMethod"),
-            new Column("", "Rate k/n", "number", s -> raw(s.number("efficiencyBitsPerSymbol")), RankedTable::writeRate),
+            new Column("", "Rate k/n", "number", RankedTable::rate, RankedTable::writeRate),
             new Column(
                     "",
                     "Band\u00adwidth",
@@ -42,12 +42,6 @@ final class RankedTable {
                     "number",
                     s -> raw(Fields.number(s.node().path("operationsPerBit"), "total")),
                     RankedTable::writeOperations),
-            new Column(
-                    "",
-                    "Un\u00addetected FER, at most",
-                    "number",
-                    s -> raw(s.number("uerUpper")),
-                    quantity("uerUpper", Quantities::errorRate)),
             new Column(
                     "",
                     "How obtained",
@@ -88,21 +82,21 @@ final class RankedTable {
     }
 
     static void write(OperatingPoint point, Markup html) {
-        List<SchemeEntry> ranked = point.ranked();
-        if (ranked.isEmpty()) {
-            html.element("p", "No scheme was ranked.");
+        List<SchemeEntry> placed = point.placed();
+        if (placed.isEmpty()) {
+            html.element("p", "For no scheme the needed Eb/N0 is known.");
             return;
         }
         List<Column> columns = COLUMNS.stream()
-                .filter(column -> ranked.stream()
+                .filter(column -> placed.stream()
                         .anyMatch(s -> !column.sortValue().apply(s).isEmpty()))
                 .toList();
+        html.element("p", "Press a heading to sort by it; press again to turn the order.", "class", "hint");
         html.open("div", "class", "scroll", "tabindex", "0", "role", "region", "aria-label", "Ranked schemes");
         html.open("table", "class", "ranked sortable");
-        html.element("caption", "Ranked schemes. Press a heading to sort by it; press again to turn the order.");
         writeHeadings(columns, html);
         html.open("tbody");
-        for (SchemeEntry scheme : ranked) {
+        for (SchemeEntry scheme : placed) {
             html.open("tr", "class", scheme.meets() ? "meets" : "fails");
             for (Column column : columns) {
                 String tag = column.style().equals("scheme") ? "th" : "td";
@@ -159,6 +153,17 @@ final class RankedTable {
         html.element("button", column.heading(), "type", "button").close();
     }
 
+    /** The order of ranks, with schemes that have none behind. */
+    private static String order(SchemeEntry scheme) {
+        return scheme.number("rank").isPresent() ? raw(scheme.number("rank")) : "1e6";
+    }
+
+    private static String rate(SchemeEntry scheme) {
+        OptionalDouble k = scheme.number("k");
+        OptionalDouble n = scheme.number("n");
+        return k.isPresent() && n.isPresent() ? Double.toString(k.getAsDouble() / n.getAsDouble()) : "";
+    }
+
     private static void writeScheme(SchemeEntry scheme, Markup html) {
         html.open("span", "class", "code").designator(scheme.code()).close();
         html.open("span", "class", "detail").designator(scheme.decoder());
@@ -178,10 +183,20 @@ final class RankedTable {
                             .toList());
             html.element("span", "\u2717\u00a0fails", "class", "no", "title", reasons.isEmpty() ? null : reasons);
         }
+        if (Fields.flag(scheme.node(), "pareto")) {
+            html.element(
+                    "span",
+                    "Pareto",
+                    "class",
+                    "detail",
+                    "title",
+                    "No scheme that meets every demand is at least as good in Eb/N0, bandwidth, latency and operations and"
+                            + " better in one of them.");
+        }
         if (scheme.tiedWithBest()) {
             html.element(
                     "span",
-                    "tied with best",
+                    "tied",
                     "class",
                     "detail",
                     "title",
@@ -241,6 +256,16 @@ final class RankedTable {
     private static void writeObtained(SchemeEntry scheme, Markup html) {
         html.text(Fields.text(scheme.node(), "neededMethod").orElse(Quantities.NONE));
         Fields.text(scheme.node(), "neededHow").ifPresent(how -> html.element("span", how, "class", "detail"));
+        OptionalDouble undetected = scheme.number("uerUpper");
+        if (undetected.isPresent()) {
+            html.element(
+                    "span",
+                    "UER\u00a0\u2264\u00a0" + Quantities.errorRate(undetected),
+                    "class",
+                    "detail",
+                    "title",
+                    "Undetected frame error rate: upper end of its interval");
+        }
     }
 
     private static String raw(OptionalDouble value) {

@@ -47,7 +47,7 @@ final class RejectedTable {
             html.text(Quantities.NONE);
         }
         html.close();
-        html.element("td", Fields.text(scheme.node(), "stage").orElse(Quantities.NONE))
+        html.element("td", Fields.text(scheme.node(), "stage").orElse(Quantities.NONE), "class", "stage")
                 .closeLine();
     }
 }

@@ -9,9 +9,9 @@ import java.util.function.DoubleFunction;
 /** What the link demands, and the link budget of each operating point. */
 final class RequirementSection {
     private static final Map<String, Demand> KNOWN = Map.ofEntries(
-            known("bandwidthHz", "Bandwidth", Quantities::hertz),
+            known("bandwidthHz", "Occupied bandwidth, at most", hz -> Quantities.stated(hz, "Hz")),
             known("rollOff", "Roll-off of the pulse", Quantities::significant),
-            known("bitRateBps", "Information bit rate", Quantities::bitsPerSecond),
+            known("bitRateBps", "Information bit rate", bps -> Quantities.stated(bps, "bit/s")),
             known("cOverN0DbHz", "Carrier-to-noise density C/N0", db -> Quantities.decibels(db) + " dBHz"),
             known("availableEbn0Db", "Available Eb/N0", db -> Quantities.decibels(db) + " dB"),
             known("payloadBits", "Payload", bits -> Quantities.count(bits) + " bits"),
@@ -19,7 +19,10 @@ final class RequirementSection {
             known("ber", "Bit error rate, at most", Quantities::errorRate),
             known("undetectedErrorRate", "Undetected frame error rate, at most", Quantities::errorRate),
             known("latencyS", "Latency, at most", Quantities::seconds),
-            known("operationsPerBit", "Decoder operations per information bit, at most", Quantities::significant),
+            known(
+                    "operationsPerBit",
+                    "Decoder operations per information bit, worst case, at most",
+                    Quantities::significant),
             known("memoryBits", "Decoder memory, at most", bits -> Quantities.count(bits) + " bits"));
 
     private RequirementSection() {}

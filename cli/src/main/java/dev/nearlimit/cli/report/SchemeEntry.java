@@ -8,8 +8,8 @@ import java.util.OptionalDouble;
 /**
  * One scheme of an operating point as the results hold it.
  *
- * @param key the short mark by which tables and charts name the scheme: its rank, or d1, d2, ... for schemes without
- *     one
+ * @param key the short mark by which tables and charts name the scheme: its rank, or f1, f2, ... for schemes that
+ *     have none because they fail
  * @param index the scheme's place in the results
  * @param node the scheme's fields
  */
@@ -35,8 +35,16 @@ record SchemeEntry(String key, int index, JsonNode node) {
         return channel.isEmpty() || quantiser.isEmpty() ? channel + quantiser : channel + ", " + quantiser;
     }
 
-    boolean ranked() {
-        return node.path("rank").isNumber();
+    /** Whether it has a place in the table: a rank, or at least an Eb/N0 that it was found to need. */
+    boolean placed() {
+        return node.path("rank").isNumber() || number("neededEbn0Db").isPresent();
+    }
+
+    /** Whether another scheme is the same but for the modulation, and so lies on the same curve for BPSK and QPSK. */
+    boolean sameCodeAndDecoder(SchemeEntry other) {
+        return code().equals(other.code())
+                && decoder().equals(other.decoder())
+                && channelAndQuantiser().equals(other.channelAndQuantiser());
     }
 
     boolean meets() {
