@@ -74,7 +74,7 @@ class MatrixFuzzTest {
     void mutatedFilesAreReadOrRefusedInOneLine(long seed) throws IOException {
         Random random = new Random(seed);
         Path path = folder.resolve(random.nextBoolean() ? "m.mtx" : "m.csv");
-        for (int trial = 0; trial < 70; trial++) {
+        for (int trial = 0; trial < 30; trial++) {
             StringBuilder text = new StringBuilder(GOOD.get(random.nextInt(GOOD.size())));
             for (int mutations = 1 + random.nextInt(3); mutations > 0; mutations--) {
                 mutate(text, random);
