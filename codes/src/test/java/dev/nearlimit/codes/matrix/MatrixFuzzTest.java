@@ -13,6 +13,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Random;
 import java.util.stream.LongStream;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
@@ -67,6 +68,17 @@ class MatrixFuzzTest {
 
     static LongStream seeds() {
         return LongStream.range(1, 61);
+    }
+
+    static LongStream moreSeeds() {
+        return LongStream.range(1001, 3001);
+    }
+
+    @Tag("thorough")
+    @ParameterizedTest
+    @MethodSource("moreSeeds")
+    void manyMutatedFilesAreReadOrRefusedInOneLine(long seed) throws IOException {
+        mutatedFilesAreReadOrRefusedInOneLine(seed);
     }
 
     @ParameterizedTest
