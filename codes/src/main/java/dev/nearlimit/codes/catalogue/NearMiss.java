@@ -8,7 +8,7 @@ import java.util.Optional;
 final class NearMiss {
     private NearMiss() {}
 
-    /** The nearest name, if no more than a third of its letters must be inserted, dropped or replaced. */
+    /** The nearest name, if no more than a third of its letters are wrong. */
     static Optional<String> nearest(String typed, Collection<String> names) {
         return names.stream()
                 .filter(name -> editDistance(typed, name) <= Math.max(1, name.length() / 3))
@@ -16,21 +16,22 @@ final class NearMiss {
                         .thenComparing(Comparator.naturalOrder()));
     }
 
-    /** Letters to insert, drop or replace to turn one word into the other (Levenshtein 1966). */
+    /** Letters to insert, drop, replace or swap with their neighbour to turn one word into the other (Damerau 1964). */
     static int editDistance(String a, String b) {
-        int[] above = new int[b.length() + 1];
-        for (int j = 0; j <= b.length(); j++) {
-            above[j] = j;
-        }
-        for (int i = 1; i <= a.length(); i++) {
-            int[] row = new int[b.length() + 1];
-            row[0] = i;
-            for (int j = 1; j <= b.length(); j++) {
-                int replaced = above[j - 1] + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-                row[j] = Math.min(replaced, 1 + Math.min(above[j], row[j - 1]));
+        int[][] distance = new int[a.length() + 1][b.length() + 1];
+        for (int i = 0; i <= a.length(); i++) {
+            for (int j = 0; j <= b.length(); j++) {
+                if (i == 0 || j == 0) {
+                    distance[i][j] = i + j;
+                    continue;
+                }
+                int replaced = distance[i - 1][j - 1] + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
+                distance[i][j] = Math.min(replaced, 1 + Math.min(distance[i - 1][j], distance[i][j - 1]));
+                if (i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1)) {
+                    distance[i][j] = Math.min(distance[i][j], distance[i - 2][j - 2] + 1);
+                }
             }
-            above = row;
         }
-        return above[b.length()];
+        return distance[a.length()][b.length()];
     }
 }

@@ -42,6 +42,10 @@ record Shortening(int bits) {
         if (bits == 0) {
             return mother;
         }
+        if (mother.k() == 1) {
+            throw new InvalidCodeException(mother.designator() + KEY + bits
+                    + ": the code has 1 information bit, which leaves none to leave out");
+        }
         if (bits >= mother.k()) {
             throw new InvalidCodeException(mother.designator() + KEY + bits + ": the code has " + mother.k()
                     + " information bits, expected to leave out 1 .. " + (mother.k() - 1));

@@ -17,19 +17,19 @@ final class BchDistance {
         int designed = 2 * code.t() + 1;
         if (n % designed == 0) {
             // (x^n + 1) / (x^(n/designed) + 1) has weight 2t+1 and vanishes at alpha, .., alpha^2t.
-            return Optional.of(new KnownDistance(
-                    designed, "designed distance divides n, MacWilliams and Sloane 1977, ch. 9 sec. 3"));
+            return Optional.of(
+                    new KnownDistance(designed, "designed distance divides n, MacWilliams and Sloane 1977, ch. 9"));
         }
         if (Integer.bitCount(designed + 1) == 1) {
             // The punctured Reed-Muller code of order m-h, distance 2^h - 1, is a subcode.
-            return Optional.of(new KnownDistance(
-                    designed, "designed distance is 2^h - 1, MacWilliams and Sloane 1977, ch. 9 sec. 3"));
+            return Optional.of(
+                    new KnownDistance(designed, "designed distance is 2^h - 1, MacWilliams and Sloane 1977, ch. 9"));
         }
         if (spheresOverlap(n, code.t() + 1, n - code.k())) {
             // Not 2t+3 or more by the sphere-packing bound, and odd because the extended code is invariant under a
-            // transitive group (Peterson 1961).
+            // transitive group (Kasami, Lin and Peterson 1968).
             return Optional.of(new KnownDistance(
-                    designed, "sphere packing and odd minimum weight, MacWilliams and Sloane 1977, ch. 9 sec. 3"));
+                    designed, "sphere packing and odd minimum weight, MacWilliams and Sloane 1977, ch. 9"));
         }
         return Optional.empty();
     }

@@ -9,7 +9,7 @@ import java.util.List;
 /**
  * Reed-Muller codes RM(r,m): position p carries the value of a polynomial of degree at most r in m binary variables at
  * the point whose i-th coordinate is bit i of p. Checks are the monomials of degree at most m-r-1, which span the dual
- * code RM(m-r-1,m) (MacWilliams and Sloane 1977, ch. 13 sec. 3). Information positions are as early as possible.
+ * code RM(m-r-1,m) (MacWilliams and Sloane 1977, ch. 13). Information positions are as early as possible.
  */
 public final class ReedMullerFamily implements CodeFamily {
     private static final int MAX_VARIABLES = 12;
@@ -46,7 +46,7 @@ public final class ReedMullerFamily implements CodeFamily {
                         "D. E. Muller 1954; I. S. Reed, IRE Trans. Information Theory 4 (1954)",
                         monomials(r, m))
                 .withParityCheck(SparseBitMatrix.of(monomials(m - r - 1, m)))
-                .withKnownDistance(1 << (m - r), "2^(m-r), MacWilliams and Sloane 1977, ch. 13 th. 3");
+                .withKnownDistance(1 << (m - r), "2^(m-r), MacWilliams and Sloane 1977, ch. 13");
     }
 
     /** One row a monomial of degree at most {@code maxDegree}: the points at which all its variables are 1. */

@@ -11,7 +11,7 @@ package dev.nearlimit.codes.matrix;
  * @param maxBytes length of the file in bytes
  */
 public record MatrixLimits(int maxRows, int maxColumns, long maxEntries, int maxOnes, long maxBytes) {
-    private static final MatrixLimits STANDARD = new MatrixLimits(1 << 16, 1 << 16, 1L << 27, 1 << 24, 1L << 28);
+    private static final MatrixLimits STANDARD = new MatrixLimits(1 << 16, 1 << 16, 1L << 27, 1 << 23, 1L << 28);
 
     public MatrixLimits {
         requirePositive(maxRows, "maxRows");
@@ -21,7 +21,7 @@ public record MatrixLimits(int maxRows, int maxColumns, long maxEntries, int max
         requirePositive(maxBytes, "maxBytes");
     }
 
-    /** 65536 rows, 65536 columns, 2^27 entries, 2^24 ones, 256 MiB. */
+    /** 65536 rows, 65536 columns, 2^27 entries, 2^23 ones, 256 MiB. */
     public static MatrixLimits standard() {
         return STANDARD;
     }

@@ -57,7 +57,9 @@ final class MatrixMarketReader {
         for (long entry = 0; entry < entries; entry++) {
             String line = nextData();
             if (line == null) {
-                throw lines.errorInFile("the end of the file after " + entry + " entries", Long.toString(entries));
+                throw lines.errorInFile(
+                        "the end of the file after " + entry + (entry == 1 ? " entry" : " entries"),
+                        Long.toString(entries));
             }
             List<Token> tokens = Token.split(line, words);
             if (tokens.size() != words) {

@@ -10,24 +10,28 @@ import java.util.List;
  * @param column its first character in the line, counted from 1
  */
 record Token(String text, int column) {
-    /** The words of a line, at most {@code most} and one more that shows that there are too many. */
+    /** The words of a line between blanks and tabs, at most {@code most} and one more that shows that there are too many. */
     static List<Token> split(String line, int most) {
         List<Token> tokens = new ArrayList<>();
         int at = 0;
         while (tokens.size() <= most) {
-            while (at < line.length() && line.charAt(at) <= ' ') {
+            while (at < line.length() && isBlank(line.charAt(at))) {
                 at++;
             }
             if (at == line.length()) {
                 break;
             }
             int start = at;
-            while (at < line.length() && line.charAt(at) > ' ') {
+            while (at < line.length() && !isBlank(line.charAt(at))) {
                 at++;
             }
             tokens.add(new Token(line.substring(start, at), start + 1));
         }
         return tokens;
+    }
+
+    private static boolean isBlank(char c) {
+        return c == ' ' || c == '\t';
     }
 
     String quoted() {
