@@ -1,0 +1,20 @@
+package dev.nearlimit.cli.requirement;
+
+import dev.nearlimit.cli.failure.InputException;
+import dev.nearlimit.codes.InvalidCodeException;
+import dev.nearlimit.decoders.InvalidDecoderException;
+import dev.nearlimit.limits.InvalidLimitException;
+import java.util.function.Supplier;
+
+/** Gives a user mistake that a room reports the place in the file where it was made. */
+final class Located {
+    private Located() {}
+
+    static <T> T at(String file, int line, int column, Supplier<T> action) {
+        try {
+            return action.get();
+        } catch (InvalidCodeException | InvalidDecoderException | InvalidLimitException e) {
+            throw new InputException(e.getMessage(), file, line, column);
+        }
+    }
+}
