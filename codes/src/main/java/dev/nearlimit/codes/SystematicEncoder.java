@@ -1,7 +1,7 @@
 package dev.nearlimit.codes;
 
 import dev.nearlimit.codes.gf2.BitMatrix;
-import java.util.Arrays;
+import dev.nearlimit.codes.gf2.SparseBitMatrix;
 
 /**
  * Encodes with a generator matrix that carries information bit i unchanged at position {@code informationPositions[i]}:
@@ -23,25 +23,14 @@ final class SystematicEncoder implements Encoder {
         }
         this.parityPositions = new int[n - informationPositions.length];
         this.sourcesOfParity = new int[parityPositions.length][];
-        BitMatrix columns = generator.transpose();
+        SparseBitMatrix columns = SparseBitMatrix.of(generator).transpose();
         int next = 0;
         for (int position = 0; position < n; position++) {
             if (!isInformation[position]) {
                 parityPositions[next] = position;
-                sourcesOfParity[next++] = ones(columns, position);
+                sourcesOfParity[next++] = columns.row(position);
             }
         }
-    }
-
-    private static int[] ones(BitMatrix matrix, int row) {
-        int[] found = new int[matrix.columns()];
-        int count = 0;
-        for (int c = 0; c < matrix.columns(); c++) {
-            if (matrix.get(row, c)) {
-                found[count++] = c;
-            }
-        }
-        return Arrays.copyOf(found, count);
     }
 
     @Override

@@ -130,6 +130,27 @@ public final class BitMatrix {
         }
     }
 
+    /** The first row from {@code fromRow} on with a 1 in {@code column}; -1 if there is none. */
+    int firstRowWithOne(int fromRow, int column) {
+        long mask = 1L << (column & 63);
+        for (int r = fromRow; r < rows; r++) {
+            if ((words[r * wordsPerRow + (column >> 6)] & mask) != 0) {
+                return r;
+            }
+        }
+        return -1;
+    }
+
+    /** Adds row {@code pivot} to every other row that has a 1 in {@code column}. */
+    void clearColumn(int pivot, int column) {
+        long mask = 1L << (column & 63);
+        for (int r = 0; r < rows; r++) {
+            if (r != pivot && (words[r * wordsPerRow + (column >> 6)] & mask) != 0) {
+                addRow(pivot, r);
+            }
+        }
+    }
+
     public void swapRows(int a, int b) {
         Objects.checkIndex(a, rows);
         Objects.checkIndex(b, rows);

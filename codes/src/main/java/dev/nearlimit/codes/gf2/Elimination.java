@@ -37,16 +37,12 @@ public record Elimination(BitMatrix reduced, int[] pivots) {
             if (rank == work.rows()) {
                 break;
             }
-            int pivotRow = firstOne(work, rank, column);
+            int pivotRow = work.firstRowWithOne(rank, column);
             if (pivotRow < 0) {
                 continue;
             }
             work.swapRows(rank, pivotRow);
-            for (int r = 0; r < work.rows(); r++) {
-                if (r != rank && work.get(r, column)) {
-                    work.addRow(rank, r);
-                }
-            }
+            work.clearColumn(rank, column);
             pivots[rank++] = column;
         }
         return new Elimination(work.selectRows(0, rank), Arrays.copyOf(pivots, rank));
@@ -83,24 +79,22 @@ public record Elimination(BitMatrix reduced, int[] pivots) {
      */
     public BitMatrix nullSpace() {
         int[] free = freeColumns();
+        int[] basisRow = new int[reduced.columns()];
         BitMatrix basis = new BitMatrix(free.length, reduced.columns());
         for (int j = 0; j < free.length; j++) {
             basis.set(j, free[j], true);
-            for (int i = 0; i < pivots.length; i++) {
-                if (reduced.get(i, free[j])) {
-                    basis.set(j, pivots[i], true);
+            basisRow[free[j]] = j;
+        }
+        SparseBitMatrix ones = SparseBitMatrix.of(reduced);
+        for (int i = 0; i < pivots.length; i++) {
+            for (int e = 0; e < ones.rowWeight(i); e++) {
+                int column = ones.column(i, e);
+                // The only pivot column in which a reduced row has a 1 is its own.
+                if (column != pivots[i]) {
+                    basis.set(basisRow[column], pivots[i], true);
                 }
             }
         }
         return basis;
-    }
-
-    private static int firstOne(BitMatrix work, int fromRow, int column) {
-        for (int r = fromRow; r < work.rows(); r++) {
-            if (work.get(r, column)) {
-                return r;
-            }
-        }
-        return -1;
     }
 }

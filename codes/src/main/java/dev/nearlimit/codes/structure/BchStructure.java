@@ -9,7 +9,7 @@ package dev.nearlimit.codes.structure;
  * @param fieldPolynomial primitive polynomial of the field with its leading term, bit i being the coefficient of x^i
  * @param t errors corrected: alpha, alpha^2, .., alpha^(2t) are zeros of the generator polynomial
  * @param extended whether an overall parity bit follows
- * @param shortened information bits left out; see DESIGN words: the last information positions
+ * @param shortened information bits left out: the coefficients of the highest powers, which are zero and not sent
  */
 public record BchStructure(int m, int fieldPolynomial, int t, boolean extended, int shortened) implements Structure {
     public BchStructure {

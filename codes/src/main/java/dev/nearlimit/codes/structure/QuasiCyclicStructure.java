@@ -1,5 +1,6 @@
 package dev.nearlimit.codes.structure;
 
+import dev.nearlimit.codes.gf2.SparseBitMatrix;
 import java.util.Arrays;
 
 /**
@@ -15,5 +16,34 @@ public record QuasiCyclicStructure(int liftingSize, int[][] shifts) implements S
             throw new IllegalArgumentException("lifting size is " + liftingSize + ", must be at least 1");
         }
         shifts = Arrays.stream(shifts).map(int[]::clone).toArray(int[][]::new);
+        for (int[] row : shifts) {
+            if (row.length != shifts[0].length) {
+                throw new IllegalArgumentException(
+                        "a block row has " + row.length + " shifts, the first has " + shifts[0].length);
+            }
+            for (int shift : row) {
+                if (shift < -1 || shift >= liftingSize) {
+                    throw new IllegalArgumentException("shift is " + shift + ", must be -1 .. " + (liftingSize - 1));
+                }
+            }
+        }
+    }
+
+    /** The (Z * block rows) x (Z * block columns) matrix that the shifts stand for. */
+    public SparseBitMatrix parityCheck() {
+        int blockColumns = shifts.length == 0 ? 0 : shifts[0].length;
+        int[][] ones = new int[shifts.length * liftingSize][];
+        for (int r = 0; r < ones.length; r++) {
+            int[] row = shifts[r / liftingSize];
+            int[] found = new int[blockColumns];
+            int count = 0;
+            for (int c = 0; c < blockColumns; c++) {
+                if (row[c] >= 0) {
+                    found[count++] = c * liftingSize + (r % liftingSize + row[c]) % liftingSize;
+                }
+            }
+            ones[r] = Arrays.copyOf(found, count);
+        }
+        return SparseBitMatrix.ofRows(blockColumns * liftingSize, ones);
     }
 }
