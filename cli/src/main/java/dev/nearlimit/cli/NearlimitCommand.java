@@ -1,5 +1,6 @@
 package dev.nearlimit.cli;
 
+import dev.nearlimit.cli.command.CodesCommand;
 import dev.nearlimit.cli.command.LimitCommand;
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
@@ -45,8 +46,7 @@ public final class NearlimitCommand implements Runnable {
 
     /** All commands; a new one is added here and nowhere else. */
     private static List<Object> commands() {
-        return List.of(
-                new LimitCommand());
+        return List.of(new CodesCommand(), new LimitCommand());
     }
 
     /**
@@ -60,8 +60,8 @@ public final class NearlimitCommand implements Runnable {
         CommandSpec spec = root.getCommandSpec();
         spec.usageMessage()
                 .description(
-                        "Which error-correcting code comes closest to what physics allows on a given link,",
-                        "what its decoder costs, and whether the decoder delivers it.")
+                        "Which error-correcting code comes closest to what physics allows on a given link, "
+                                + "what its decoder costs, and whether the decoder delivers it.")
                 .footer(
                         "%nExample:%n  nearlimit limit --rate 1/2 --modulation qpsk%n"
                                 + "nearlimit COMMAND --help shows what a command takes, with an example.");

@@ -118,7 +118,7 @@ public final class Code {
         BitMatrix columns = generator.transpose();
         for (int c = 0; c < columns.rows(); c++) {
             if (columns.rowWeight(c) == 1) {
-                int row = SparseBitMatrix.of(columns.selectRows(c, c + 1)).column(0, 0);
+                int row = columns.onesOfRow(c)[0];
                 if (positions[row] < 0) {
                     positions[row] = c;
                 }

@@ -1,7 +1,6 @@
 package dev.nearlimit.codes;
 
 import dev.nearlimit.codes.gf2.BitMatrix;
-import dev.nearlimit.codes.gf2.SparseBitMatrix;
 
 /**
  * Encodes with a generator matrix that carries information bit i unchanged at position {@code informationPositions[i]}:
@@ -23,12 +22,12 @@ final class SystematicEncoder implements Encoder {
         }
         this.parityPositions = new int[n - informationPositions.length];
         this.sourcesOfParity = new int[parityPositions.length][];
-        SparseBitMatrix columns = SparseBitMatrix.of(generator).transpose();
+        BitMatrix columns = generator.transpose();
         int next = 0;
         for (int position = 0; position < n; position++) {
             if (!isInformation[position]) {
                 parityPositions[next] = position;
-                sourcesOfParity[next++] = columns.row(position);
+                sourcesOfParity[next++] = columns.onesOfRow(position);
             }
         }
     }

@@ -10,6 +10,7 @@ import com.fasterxml.jackson.databind.ObjectWriter;
 import com.fasterxml.jackson.databind.json.JsonMapper;
 import com.fasterxml.jackson.databind.node.JsonNodeFactory;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.OptionalInt;
 
 /** JSON on its way out: indented, the same digits on every JVM, no value where a number is unknown. */
 public final class JsonText {
@@ -33,6 +34,15 @@ public final class JsonText {
     public static void put(ObjectNode node, String field, double value) {
         if (Double.isFinite(value)) {
             node.put(field, value);
+        } else {
+            node.putNull(field);
+        }
+    }
+
+    /** Puts a whole number, or null where there is none. */
+    public static void put(ObjectNode node, String field, OptionalInt value) {
+        if (value.isPresent()) {
+            node.put(field, value.getAsInt());
         } else {
             node.putNull(field);
         }

@@ -12,6 +12,12 @@ import dev.nearlimit.codes.family.Ieee80211nLdpcFamily;
 import dev.nearlimit.codes.family.ParityCheckFamily;
 import dev.nearlimit.codes.family.ReedMullerFamily;
 import dev.nearlimit.codes.family.RepetitionFamily;
+import dev.nearlimit.codes.matrix.MatrixFile;
+import dev.nearlimit.codes.matrix.MatrixLimits;
+import dev.nearlimit.codes.matrix.MatrixRole;
+import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
@@ -72,6 +78,31 @@ public final class Catalogue {
         }
         Shortening shortening = Shortening.parse(designator.suffixes());
         return shortening.applyTo(family.build(designator.parameters()));
+    }
+
+    /**
+     * Builds a code from the user's matrix file, named by its path and, if there is no file of just that name, by its path
+     * followed by {@code +shorten=s}.
+     *
+     * @throws InvalidCodeException if the file is no matrix, the matrix makes no code, or the modification does not apply
+     */
+    public static Code fromFile(String text, MatrixRole role, MatrixLimits limits) {
+        int plus = exists(text) ? -1 : text.lastIndexOf(Shortening.KEY);
+        String path = plus < 0 ? text : text.substring(0, plus);
+        Shortening shortening = Shortening.parse(plus < 0 ? "" : text.substring(plus));
+        try {
+            return shortening.applyTo(MatrixFile.readCode(Path.of(path), role, limits));
+        } catch (InvalidPathException e) {
+            throw new InvalidCodeException("'" + path + "' is no path: " + e.getReason(), e);
+        }
+    }
+
+    private static boolean exists(String path) {
+        try {
+            return Files.exists(Path.of(path));
+        } catch (InvalidPathException e) {
+            return false;
+        }
     }
 
     private Optional<CodeFamily> family(String name) {

@@ -19,7 +19,7 @@ import java.util.Optional;
  * @param bits information bits left out, at least 0
  */
 record Shortening(int bits) {
-    private static final String KEY = "+shorten=";
+    static final String KEY = "+shorten=";
 
     /** Reads what follows the parameters of a designator: nothing, or {@code +shorten=s}. */
     static Shortening parse(String suffixes) {

@@ -110,6 +110,18 @@ public final class BitMatrix {
         return words[row * wordsPerRow + word];
     }
 
+    /** The ascending column numbers of a row's ones. */
+    public int[] onesOfRow(int row) {
+        int[] found = new int[rowWeight(row)];
+        int next = 0;
+        for (int w = 0; w < wordsPerRow; w++) {
+            for (long rest = words[row * wordsPerRow + w]; rest != 0; rest &= rest - 1) {
+                found[next++] = (w << 6) + Long.numberOfTrailingZeros(rest);
+            }
+        }
+        return found;
+    }
+
     /** XORs a row of this matrix into {@code target}, which has at least {@link #wordsPerRow()} words. */
     public void xorRowInto(int row, long[] target) {
         Objects.checkIndex(row, rows);

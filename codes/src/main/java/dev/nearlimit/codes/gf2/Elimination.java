@@ -85,10 +85,8 @@ public record Elimination(BitMatrix reduced, int[] pivots) {
             basis.set(j, free[j], true);
             basisRow[free[j]] = j;
         }
-        SparseBitMatrix ones = SparseBitMatrix.of(reduced);
         for (int i = 0; i < pivots.length; i++) {
-            for (int e = 0; e < ones.rowWeight(i); e++) {
-                int column = ones.column(i, e);
+            for (int column : reduced.onesOfRow(i)) {
                 // The only pivot column in which a reduced row has a 1 is its own.
                 if (column != pivots[i]) {
                     basis.set(basisRow[column], pivots[i], true);

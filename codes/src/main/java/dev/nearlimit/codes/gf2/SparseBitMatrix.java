@@ -49,16 +49,7 @@ public final class SparseBitMatrix {
 
     public static SparseBitMatrix of(BitMatrix dense) {
         int[][] ones = new int[dense.rows()][];
-        for (int r = 0; r < ones.length; r++) {
-            int[] found = new int[dense.rowWeight(r)];
-            int next = 0;
-            for (int w = 0; w < dense.wordsPerRow(); w++) {
-                for (long rest = dense.word(r, w); rest != 0; rest &= rest - 1) {
-                    found[next++] = (w << 6) + Long.numberOfTrailingZeros(rest);
-                }
-            }
-            ones[r] = found;
-        }
+        Arrays.setAll(ones, dense::onesOfRow);
         return ofRows(dense.columns(), ones);
     }
 

@@ -9,6 +9,8 @@ package dev.nearlimit.limits;
  */
 public final class ShannonLimit {
     private static final double LN2 = Math.log(2);
+    /** Below this, exp does not overflow. */
+    private static final double LARGEST_EXPONENT = 700;
 
     private ShannonLimit() {}
 
@@ -25,7 +27,9 @@ public final class ShannonLimit {
      */
     public static double leastEbn0Db(double rate) {
         double x = 2 * LN2 * Checks.positive(rate, "rate");
-        return Decibels.fromNaturalLog(Math.log(LN2) + logGrowth(x));
+        return x < LARGEST_EXPONENT
+                ? Decibels.fromLinear(Math.expm1(x) / (2 * rate))
+                : Decibels.fromNaturalLog(Math.log(LN2) + logGrowth(x));
     }
 
     /** The largest number of bits per real dimension at an Eb/N0; 0 at and below ln 2, -1.59 dB. */

@@ -30,7 +30,7 @@ class MacWilliamsTest {
     /** The dual of the simplex code, all of whose 2^m - 1 words have weight 2^(m-1), is the Hamming code. */
     @Test
     void longTransformTwiceIsTheIdentity() {
-        int m = 10;
+        int m = 8;
         long[] counts = new long[1 << m];
         counts[0] = 1;
         counts[1 << (m - 1)] = (1L << m) - 1;
@@ -38,7 +38,7 @@ class MacWilliamsTest {
         WeightEnumerator hamming = MacWilliams.dual(simplex, m);
         assertEquals(3, hamming.minimumDistance());
         // A_3 = n (n - 1) / 6: MacWilliams and Sloane 1977, ch. 1
-        assertEquals(BigInteger.valueOf(1023L * 1022 / 6), hamming.count(3));
+        assertEquals(BigInteger.valueOf(255L * 254 / 6), hamming.count(3));
         assertEquals(simplex, MacWilliams.dual(hamming));
     }
 

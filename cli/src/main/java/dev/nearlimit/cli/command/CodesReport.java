@@ -1,0 +1,85 @@
+package dev.nearlimit.cli.command;
+
+import com.fasterxml.jackson.databind.node.ArrayNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import dev.nearlimit.cli.output.CsvText;
+import dev.nearlimit.cli.output.JsonText;
+import dev.nearlimit.cli.output.Numbers;
+import dev.nearlimit.cli.output.Presentation;
+import dev.nearlimit.cli.output.TextTable;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.Collectors;
+
+/**
+ * The list of codes as a result to show.
+ *
+ * @param codes family by family
+ */
+record CodesReport(List<ListedCode> codes) implements Presentation {
+    @Override
+    public String table() {
+        if (codes.isEmpty()) {
+            return "no code in the list has these properties\n";
+        }
+        TextTable table = new TextTable()
+                .words("code")
+                .numbers("n", "bit")
+                .numbers("k", "bit")
+                .numbers("rate")
+                .numbers("min. distance");
+        for (ListedCode code : codes) {
+            table.row(
+                    code.designator(),
+                    String.valueOf(code.n()),
+                    String.valueOf(code.k()),
+                    Numbers.fixed(code.rateValue(), 4),
+                    code.minimumDistance().isPresent()
+                            ? String.valueOf(code.minimumDistance().getAsInt())
+                            : Numbers.UNKNOWN);
+        }
+        return table + "\n" + sources() + "\nOther members of a family are named the same way; a distance shown as - may be\n"
+                + "computed by nearlimit inspect CODE.\n";
+    }
+
+    /** Where each family comes from, once. */
+    private String sources() {
+        Map<String, String> byFamily = codes.stream()
+                .collect(Collectors.toMap(ListedCode::family, ListedCode::source, (a, b) -> a, LinkedHashMap::new));
+        TextTable table = new TextTable().words("family").words("source");
+        byFamily.forEach(table::row);
+        return table.toString();
+    }
+
+    @Override
+    public CsvText csv() {
+        CsvText csv = new CsvText("code", "n", "k", "rate", "minimumDistance", "source");
+        for (ListedCode code : codes) {
+            csv.record(
+                    code.designator(),
+                    code.n(),
+                    code.k(),
+                    code.rate(),
+                    code.minimumDistance().isPresent() ? code.minimumDistance().getAsInt() : null,
+                    code.source());
+        }
+        return csv;
+    }
+
+    @Override
+    public ObjectNode json() {
+        ObjectNode root = JsonText.object();
+        ArrayNode list = root.putArray("codes");
+        for (ListedCode code : codes) {
+            ObjectNode entry = list.addObject();
+            entry.put("code", code.designator());
+            entry.put("n", code.n());
+            entry.put("k", code.k());
+            entry.put("rate", code.rate());
+            JsonText.put(entry, "minimumDistance", code.minimumDistance());
+            entry.put("source", code.source());
+        }
+        return root;
+    }
+}

@@ -1,0 +1,119 @@
+package dev.nearlimit.cli.report;
+
+import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import java.io.IOException;
+import java.nio.file.AtomicMoveNotSupportedException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * Draws the results of a shortlist as one self-contained HTML page: answer, requirement and link budget, ranked table,
+ * charts, and what is needed to reproduce the figures. The page opens offline, asks nothing of any server and carries
+ * the results themselves as JSON. Only formatting happens here; fields that the results lack leave gaps on the page,
+ * never an error.
+ */
+public final class HtmlReport {
+    private static final String CHART_LIBRARY = "/META-INF/resources/webjars/echarts/5.3.1/dist/echarts.min.js";
+
+    private HtmlReport() {}
+
+    /**
+     * Writes the page. It is written beside the target first and renamed when whole, so that a failure leaves no half
+     * page and an earlier page stays as it was.
+     *
+     * @param results the results of the shortlist command, with Eb/N0 in dB, as the JSON contract has them
+     * @param target where the page goes; its folder must exist, and a file that is there already is replaced
+     * @throws IOException if the page cannot be written there
+     */
+    public static void write(JsonNode results, Path target) throws IOException {
+        Path whole = target.toAbsolutePath();
+        Path partial = whole.resolveSibling(
+                "." + whole.getFileName() + "." + ProcessHandle.current().pid() + ".partial");
+        try {
+            Files.writeString(partial, render(results));
+            try {
+                Files.move(partial, whole, StandardCopyOption.ATOMIC_MOVE);
+            } catch (AtomicMoveNotSupportedException e) {
+                Files.move(partial, whole, StandardCopyOption.REPLACE_EXISTING);
+            }
+        } finally {
+            Files.deleteIfExists(partial);
+        }
+    }
+
+    /**
+     * Renders the page.
+     *
+     * @param results the results of the shortlist command
+     * @return the whole page, UTF-8 by declaration
+     */
+    public static String render(JsonNode results) {
+        JsonNode requirement = results.path("requirement");
+        List<OperatingPoint> points = new ArrayList<>();
+        for (JsonNode point : results.path("operatingPoints")) {
+            points.add(OperatingPoint.of(points.size(), point));
+        }
+        String name = Fields.text(requirement, "name").orElse("Unnamed requirement");
+        return PageTemplate.load()
+                .fill(Map.of(
+                        "title", new Markup().text(name).html(),
+                        "style", PageTemplate.resource("report.css"),
+                        "main", main(results, requirement, points, name),
+                        "results", embeddable(results),
+                        "chart-library", withoutEndTags(PageTemplate.resource(CHART_LIBRARY)),
+                        "script", withoutEndTags(PageTemplate.resource("report.js"))));
+    }
+
+    private static String main(JsonNode results, JsonNode requirement, List<OperatingPoint> points, String name) {
+        Markup html = new Markup();
+        html.open("header").element("p", "Nearlimit shortlist", "class", "kind");
+        html.element("h1", name);
+        Fields.text(requirement, "description").ifPresent(text -> html.element("p", text, "class", "description"));
+        html.closeLine();
+        boolean several = points.size() > 1;
+        html.open("section", "id", "answer");
+        html.element("h2", several ? "Answers" : "Answer");
+        if (points.isEmpty()) {
+            html.element("p", "The results hold no operating point.");
+        }
+        for (OperatingPoint point : points) {
+            if (several) {
+                html.element("h3", point.name());
+            }
+            AnswerSection.write(requirement, point, html);
+        }
+        html.closeLine();
+        RequirementSection.write(requirement, points, html);
+        for (OperatingPoint point : points) {
+            html.open("section", "class", "operating-point");
+            html.element("h2", several ? "Schemes: " + point.name() : "Schemes");
+            RankedTable.write(point, html);
+            RejectedTable.write(point, html);
+            ChartSection.write(point, html);
+            MeasuredPoints.write(point, html);
+            html.closeLine();
+        }
+        ClosingSections.write(results, html);
+        return html.html();
+    }
+
+    /** JSON that may stand inside a script element: no tag can begin where there is no less-than sign. */
+    private static String embeddable(JsonNode results) {
+        try {
+            return new ObjectMapper().writeValueAsString(results).replace("<", "\\u003c");
+        } catch (JsonProcessingException e) {
+            throw new IllegalArgumentException("the results cannot be written as JSON", e);
+        }
+    }
+
+    /** A script in which no string ends the element that holds it. */
+    private static String withoutEndTags(String script) {
+        return script.replaceAll("(?i)</(?=script)", "<\\\\/");
+    }
+}

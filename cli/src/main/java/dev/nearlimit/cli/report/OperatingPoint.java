@@ -1,0 +1,69 @@
+package dev.nearlimit.cli.report;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+
+/**
+ * One operating point of the requirement with its schemes.
+ *
+ * @param index its place in the results
+ * @param node its fields
+ * @param schemes the ranked schemes in rank order, then the others as they stand
+ */
+record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
+    /** How many curves the error-rate chart shows before the reader picks others: more would hide each other. */
+    private static final int CURVES_AT_FIRST = 5;
+
+    static OperatingPoint of(int index, JsonNode node) {
+        List<SchemeEntry> ranked = new ArrayList<>();
+        List<SchemeEntry> others = new ArrayList<>();
+        int i = 0;
+        for (JsonNode scheme : node.path("schemes")) {
+            if (scheme.path("rank").isNumber()) {
+                ranked.add(new SchemeEntry(scheme.path("rank").asText(), i, scheme));
+            } else {
+                others.add(new SchemeEntry("d" + (others.size() + 1), i, scheme));
+            }
+            i++;
+        }
+        ranked.sort(Comparator.comparingInt(scheme -> scheme.node().path("rank").asInt()));
+        ranked.addAll(others);
+        return new OperatingPoint(index, node, List.copyOf(ranked));
+    }
+
+    String name() {
+        return Fields.text(node, "name").orElse("Operating point " + (index + 1));
+    }
+
+    List<SchemeEntry> ranked() {
+        return schemes.stream().filter(SchemeEntry::ranked).toList();
+    }
+
+    /** Schemes that fail a demand or were dropped before they had a rank. */
+    List<SchemeEntry> rejected() {
+        return schemes.stream()
+                .filter(scheme -> !scheme.meets() || !scheme.ranked())
+                .toList();
+    }
+
+    /** The best scheme that meets every demand. */
+    Optional<SchemeEntry> winner() {
+        return schemes.stream().filter(SchemeEntry::meets).findFirst();
+    }
+
+    /** The schemes whose curves are shown at first, by their index in the results. */
+    Set<Integer> shownAtFirst() {
+        Set<Integer> shown = new LinkedHashSet<>();
+        for (SchemeEntry scheme : schemes) {
+            if (scheme.hasCurve() && shown.size() < CURVES_AT_FIRST) {
+                shown.add(scheme.index());
+            }
+        }
+        return shown;
+    }
+}

@@ -1,0 +1,249 @@
+package dev.nearlimit.cli.report;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.function.BiConsumer;
+import java.util.function.Function;
+
+/**
+ * The ranked schemes, one a row. Every column can be sorted by the button in its heading; the value it is sorted by
+ * stands in the cell's {@code data-value}. A column that no scheme has a value for is left out.
+ */
+final class RankedTable {
+    private static final List<Column> COLUMNS = List.of(
+            new Column("", "#", "rank", s -> raw(s.number("rank")), (s, html) -> html.text(s.key())),
+            new Column("", "Scheme", "scheme", s -> s.code() + " " + s.decoder(), RankedTable::writeScheme),
+            new Column("", "Verdict", "verdict", s -> s.meets() ? "0" : "1", RankedTable::writeVerdict),
+            new Column("", "Needed Eb/N0 [dB]", "number", s -> raw(s.number("neededEbn0Db")), RankedTable::writeNeeded),
+            decibels("", "Margin [dB]", "marginDb", null),
+            decibels("", "Coding gain [dB]", "codingGainDb", "codingGainMethod"),
+            decibels("Gap [dB] to the limit", "Shannon", "gapToShannonDb", null),
+            decibels("Gap [dB] to the limit", "Modula\u00adtion", "gapToModulationLimitDb", null),
+            decibels("Gap [dB] to the limit", "Hard decision", "gapToHardDecisionLimitDb", null),
+            decibels("Gap [dB] to the limit", "Finite length", "gapToFiniteLengthDb", "gapToFiniteLengthMethod"),
+            new Column("", "Rate k/n", "number", s -> raw(s.number("efficiencyBitsPerSymbol")), RankedTable::writeRate),
+            new Column(
+                    "",
+                    "Band\u00adwidth",
+                    "number",
+                    s -> raw(s.number("occupiedBandwidthHz")),
+                    quantity("occupiedBandwidthHz", Quantities::hertz)),
+            new Column(
+                    "",
+                    "Latency",
+                    "number",
+                    s -> raw(Fields.number(s.node().path("latencyS"), "total")),
+                    RankedTable::writeLatency),
+            new Column(
+                    "",
+                    "Opera\u00adtions per bit",
+                    "number",
+                    s -> raw(Fields.number(s.node().path("operationsPerBit"), "total")),
+                    RankedTable::writeOperations),
+            new Column(
+                    "",
+                    "Un\u00addetected FER, at most",
+                    "number",
+                    s -> raw(s.number("uerUpper")),
+                    quantity("uerUpper", Quantities::errorRate)),
+            new Column(
+                    "",
+                    "How obtained",
+                    "obtained",
+                    s -> Fields.text(s.node(), "neededMethod").orElse(""),
+                    RankedTable::writeObtained));
+
+    private RankedTable() {}
+
+    /**
+     * A column.
+     *
+     * @param group the heading shared with its neighbours, or an empty text
+     * @param heading its own heading
+     * @param style the class of its cells
+     * @param sortValue what it is sorted by; an empty text where the scheme has no value
+     * @param cell writes the cell's content
+     */
+    private record Column(
+            String group,
+            String heading,
+            String style,
+            Function<SchemeEntry, String> sortValue,
+            BiConsumer<SchemeEntry, Markup> cell) {}
+
+    private static Column decibels(String group, String heading, String field, String methodField) {
+        return new Column(group, heading, "number", s -> raw(s.number(field)), (s, html) -> {
+            html.text(Quantities.decibels(s.number(field)));
+            if (methodField != null && s.number(field).isPresent()) {
+                Provenance.write(html, Fields.text(s.node(), methodField).orElse(""));
+            }
+        });
+    }
+
+    private static BiConsumer<SchemeEntry, Markup> quantity(String field, Function<Double, String> format) {
+        return (s, html) -> html.text(
+                s.number(field).isPresent() ? format.apply(s.number(field).getAsDouble()) : Quantities.NONE);
+    }
+
+    static void write(OperatingPoint point, Markup html) {
+        List<SchemeEntry> ranked = point.ranked();
+        if (ranked.isEmpty()) {
+            html.element("p", "No scheme was ranked.");
+            return;
+        }
+        List<Column> columns = COLUMNS.stream()
+                .filter(column -> ranked.stream()
+                        .anyMatch(s -> !column.sortValue().apply(s).isEmpty()))
+                .toList();
+        html.open("div", "class", "scroll", "tabindex", "0", "role", "region", "aria-label", "Ranked schemes");
+        html.open("table", "class", "ranked sortable");
+        html.element("caption", "Ranked schemes. Press a heading to sort by it; press again to turn the order.");
+        writeHeadings(columns, html);
+        html.open("tbody");
+        for (SchemeEntry scheme : ranked) {
+            html.open("tr", "class", scheme.meets() ? "meets" : "fails");
+            for (Column column : columns) {
+                String tag = column.style().equals("scheme") ? "th" : "td";
+                html.open(
+                        tag,
+                        "class",
+                        column.style(),
+                        "scope",
+                        tag.equals("th") ? "row" : null,
+                        "data-value",
+                        column.sortValue().apply(scheme));
+                column.cell().accept(scheme, html);
+                html.close();
+            }
+            html.closeLine();
+        }
+        html.close().close().closeLine();
+    }
+
+    private static void writeHeadings(List<Column> columns, Markup html) {
+        html.open("thead").open("tr");
+        for (int i = 0; i < columns.size(); ) {
+            Column column = columns.get(i);
+            if (column.group().isEmpty()) {
+                writeHeading(column, "2", i == 0 ? "ascending" : "none", html);
+                i++;
+            } else {
+                int first = i;
+                while (i < columns.size() && columns.get(i).group().equals(column.group())) {
+                    i++;
+                }
+                html.element(
+                        "th",
+                        column.group(),
+                        "class",
+                        "group",
+                        "scope",
+                        "colgroup",
+                        "colspan",
+                        String.valueOf(i - first));
+            }
+        }
+        html.close().open("tr");
+        for (Column column : columns) {
+            if (!column.group().isEmpty()) {
+                writeHeading(column, null, "none", html);
+            }
+        }
+        html.close().closeLine();
+    }
+
+    private static void writeHeading(Column column, String rows, String sorted, Markup html) {
+        html.open("th", "class", column.style(), "scope", "col", "rowspan", rows, "aria-sort", sorted);
+        html.element("button", column.heading(), "type", "button").close();
+    }
+
+    private static void writeScheme(SchemeEntry scheme, Markup html) {
+        html.open("span", "class", "code").designator(scheme.code()).close();
+        html.open("span", "class", "detail").designator(scheme.decoder());
+        html.text(" \u00b7 " + scheme.modulation());
+        String rest = scheme.channelAndQuantiser();
+        html.text(rest.isEmpty() ? "" : " \u00b7 " + rest).close();
+    }
+
+    private static void writeVerdict(SchemeEntry scheme, Markup html) {
+        if (scheme.meets()) {
+            html.element("span", "\u2713\u00a0meets", "class", "yes");
+        } else {
+            String reasons = String.join(
+                    "; ",
+                    scheme.failures().stream()
+                            .map(SchemeEntry.Failure::sentence)
+                            .toList());
+            html.element("span", "\u2717\u00a0fails", "class", "no", "title", reasons.isEmpty() ? null : reasons);
+        }
+        if (scheme.tiedWithBest()) {
+            html.element(
+                    "span",
+                    "tied with best",
+                    "class",
+                    "detail",
+                    "title",
+                    "The intervals overlap: these measurements do not tell the schemes apart.");
+        }
+    }
+
+    private static void writeNeeded(SchemeEntry scheme, Markup html) {
+        html.text(Quantities.decibels(scheme.number("neededEbn0Db")));
+        Provenance.write(html, Fields.text(scheme.node(), "neededMethod").orElse(""));
+        String interval = scheme.neededInterval("\u2009\u2026\u2009");
+        if (!interval.isEmpty()) {
+            html.element("span", interval, "class", "detail", "title", "95 % interval [dB]");
+        }
+    }
+
+    private static void writeRate(SchemeEntry scheme, Markup html) {
+        html.text(Fields.text(scheme.node(), "rate").orElse(Quantities.NONE));
+        OptionalDouble codewords = scheme.number("codewordsPerPayload");
+        if (codewords.isPresent() && codewords.getAsDouble() > 1) {
+            html.element("span", Quantities.count(codewords.getAsDouble()) + " codewords", "class", "detail");
+        }
+    }
+
+    private static void writeLatency(SchemeEntry scheme, Markup html) {
+        JsonNode latency = scheme.node().path("latencyS");
+        OptionalDouble total = Fields.number(latency, "total");
+        List<String> parts = new ArrayList<>();
+        for (String part : List.of("fill", "air", "interleaver", "decode")) {
+            Fields.number(latency, part).ifPresent(s -> parts.add(part + " " + Quantities.seconds(s)));
+        }
+        html.element(
+                "span",
+                total.isPresent() ? Quantities.seconds(total.getAsDouble()) : Quantities.NONE,
+                "title",
+                parts.isEmpty() ? null : String.join(", ", parts));
+    }
+
+    private static void writeOperations(SchemeEntry scheme, Markup html) {
+        JsonNode operations = scheme.node().path("operationsPerBit");
+        OptionalDouble total = Fields.number(operations, "total");
+        List<String> parts = new ArrayList<>();
+        for (String part : List.of("additions", "comparisons", "lookups")) {
+            Fields.number(operations, part).ifPresent(n -> parts.add(part + " " + Quantities.significant(n)));
+        }
+        html.element(
+                "span",
+                total.isPresent() ? Quantities.significant(total.getAsDouble()) : Quantities.NONE,
+                "title",
+                parts.isEmpty() ? null : String.join(", ", parts));
+        OptionalDouble worst = Fields.number(operations, "worstCase");
+        if (worst.isPresent()) {
+            html.element("span", "worst " + Quantities.significant(worst.getAsDouble()), "class", "detail");
+        }
+    }
+
+    private static void writeObtained(SchemeEntry scheme, Markup html) {
+        html.text(Fields.text(scheme.node(), "neededMethod").orElse(Quantities.NONE));
+        Fields.text(scheme.node(), "neededHow").ifPresent(how -> html.element("span", how, "class", "detail"));
+    }
+
+    private static String raw(OptionalDouble value) {
+        return value.isPresent() ? Double.toString(value.getAsDouble()) : "";
+    }
+}

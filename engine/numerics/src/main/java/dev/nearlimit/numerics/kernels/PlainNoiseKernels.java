@@ -1,0 +1,103 @@
+package dev.nearlimit.numerics.kernels;
+
+/** The passes in plain Java, each a loop without branches that the JIT can vectorise where it is able to. */
+final class PlainNoiseKernels implements NoiseKernels {
+    private static final int LANES = 64;
+    private static final float ANGLE_UNIT = (float) (Math.PI / 4 / 2147483648.0);
+    private static final int SIGN = 0x80000000;
+
+    @Override
+    public String name() {
+        return "plain";
+    }
+
+    @Override
+    public void fill(long[] state, long[] draws, int steps) {
+        for (int s = 0; s < steps; s++) {
+            step(state, draws, s * LANES);
+        }
+    }
+
+    private static void step(long[] state, long[] draws, int at) {
+        for (int l = 0; l < LANES; l++) {
+            long s0 = state[l];
+            long s1 = state[LANES + l];
+            long s2 = state[2 * LANES + l];
+            long s3 = state[3 * LANES + l];
+            draws[at + l] = Long.rotateLeft(s0 + s3, 23) + s0;
+            long t = s1 << 17;
+            s2 ^= s0;
+            s3 ^= s1;
+            s1 ^= s2;
+            s0 ^= s3;
+            s2 ^= t;
+            state[l] = s0;
+            state[LANES + l] = s1;
+            state[2 * LANES + l] = s2;
+            state[3 * LANES + l] = Long.rotateLeft(s3, 45);
+        }
+    }
+
+    @Override
+    public void split(long[] draws, int[] high, int[] low, int count) {
+        for (int i = 0; i < count; i++) {
+            long draw = draws[i];
+            high[i] = (int) (draw >>> 32);
+            low[i] = (int) draw;
+        }
+    }
+
+    @Override
+    public boolean anyInTail(int[] high, int count) {
+        // Only a cell below 64 makes high >>> 7 zero and so the difference negative.
+        int signs = 0;
+        for (int i = 0; i < count; i++) {
+            signs |= (high[i] >>> 7) - 1;
+        }
+        return signs < 0;
+    }
+
+    @Override
+    public void radius(int[] high, float[] radius, int count) {
+        for (int i = 0; i < count; i++) {
+            radius[i] = Radius.ofDraw(high[i]);
+        }
+    }
+
+    @Override
+    public void rotate(int[] low, float[] radius, float[] samples, int count) {
+        for (int row = 0; row < count; row += LANES) {
+            rotateRow(low, radius, samples, row);
+        }
+    }
+
+    private static void rotateRow(int[] low, float[] radius, float[] samples, int row) {
+        for (int l = 0; l < LANES; l++) {
+            int b = low[row + l];
+            float r = radius[row + l];
+            float t = (float) (b << 2) * ANGLE_UNIT;
+            float t2 = t * t;
+            float c = r * cosine(t2);
+            float s = r * sine(t, t2);
+            int x = Float.floatToRawIntBits(c) ^ (b & SIGN);
+            int y = Float.floatToRawIntBits(s);
+            int exchange = (x ^ y) & (b << 1 >> 31);
+            samples[2 * row + l] = Float.intBitsToFloat(x ^ exchange);
+            samples[2 * row + LANES + l] = Float.intBitsToFloat(y ^ exchange);
+        }
+    }
+
+    /** sin t for |t| up to pi/4, t2 being t*t. Coefficients of the Cephes single-precision sine. */
+    static float sine(float t, float t2) {
+        float p = t2 * -1.9515295891E-4f + 8.3321608736E-3f;
+        p = p * t2 + -1.6666654611E-1f;
+        return p * t2 * t + t;
+    }
+
+    /** cos t for |t| up to pi/4 from t2 = t*t. Coefficients of the Cephes single-precision cosine. */
+    static float cosine(float t2) {
+        float p = t2 * 2.443315711809948E-5f + -1.388731625493765E-3f;
+        p = p * t2 + 4.166664568298827E-2f;
+        return p * t2 * t2 - t2 * 0.5f + 1f;
+    }
+}
