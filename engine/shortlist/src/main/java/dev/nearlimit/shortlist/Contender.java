@@ -1,6 +1,6 @@
 package dev.nearlimit.shortlist;
 
-import dev.nearlimit.decoders.DecoderChoice;
+import dev.nearlimit.decoders.catalogue.DecoderChoice;
 import dev.nearlimit.limits.BinaryInputAwgn;
 import dev.nearlimit.limits.HardDecisionAwgn;
 import dev.nearlimit.limits.InvalidLimitException;

@@ -2,7 +2,7 @@ package dev.nearlimit.shortlist;
 
 import dev.nearlimit.shortlist.requirement.Requirement;
 import dev.nearlimit.shortlist.result.SchemeResult.Failure;
-import dev.nearlimit.simulation.ErrorRateIntervals;
+import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -92,7 +92,7 @@ final class Demands {
                             limit,
                             limit - leftDb)));
         } else if (standing.trial() != null && standing.failedTrial()) {
-            double low = ErrorRateIntervals.fer(standing.trial().counts(), standing.trial().rule(), 0.95)
+            double low = new ErrorRateIntervals().frameErrorRate(standing.trial().counts(), standing.trial().rule())
                     .low();
             failures.add(new Failure(
                     demand,

@@ -13,17 +13,17 @@ import dev.nearlimit.shortlist.result.SchemeResult.Failure;
 import dev.nearlimit.shortlist.result.SchemeResult.Latency;
 import dev.nearlimit.shortlist.result.SchemeResult.Operations;
 import dev.nearlimit.shortlist.result.SchemeResult.Point;
-import dev.nearlimit.simulation.ErrorRateIntervals;
-import dev.nearlimit.simulation.Interval;
 import dev.nearlimit.simulation.PointCounts;
 import dev.nearlimit.simulation.search.MeasuredPoint;
+import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
+import dev.nearlimit.simulation.statistics.Interval;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.TreeMap;
 
 /** Writes down what is known of a contender carried by one modulation: the row of the shortlist, before it is ranked. */
 final class SchemeAssembler {
-    private static final double CONFIDENCE = 0.95;
+    private static final ErrorRateIntervals INTERVALS = new ErrorRateIntervals();
 
     /** Grid of the exact curves drawn in charts [dB]. */
     private static final double EXACT_STEP_DB = 0.25;
@@ -119,9 +119,7 @@ final class SchemeAssembler {
         if (curve == null || curve.nearNeeded() == null) {
             return null;
         }
-        return ErrorRateIntervals.undetected(
-                        curve.nearNeeded().counts(), curve.nearNeeded().rule(), CONFIDENCE)
-                .high();
+        return INTERVALS.undetectedErrorRateUpper(curve.nearNeeded().counts());
     }
 
     private static List<Point> points(Standing standing) {
@@ -144,8 +142,8 @@ final class SchemeAssembler {
     private static Point point(Contender contender, MeasuredPoint point) {
         PointCounts counts = point.counts();
         int k = contender.fit().code().k();
-        Interval fer = ErrorRateIntervals.fer(counts, point.rule(), CONFIDENCE);
-        Interval ber = ErrorRateIntervals.ber(counts, k, point.rule(), CONFIDENCE);
+        Interval fer = INTERVALS.frameErrorRate(counts, point.rule());
+        Interval ber = INTERVALS.bitErrorRate(counts, k);
         return new Point(
                 point.ebn0Db() + contender.fit().fillerDb(),
                 counts.frames(),

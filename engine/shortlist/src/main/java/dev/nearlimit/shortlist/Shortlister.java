@@ -1,6 +1,6 @@
 package dev.nearlimit.shortlist;
 
-import dev.nearlimit.decoders.DecoderChoice;
+import dev.nearlimit.decoders.catalogue.DecoderChoice;
 import dev.nearlimit.limits.Modulation;
 import dev.nearlimit.shortlist.evaluation.CurveSearch;
 import dev.nearlimit.shortlist.evaluation.PayloadFit;

@@ -1,13 +1,13 @@
 package dev.nearlimit.shortlist.evaluation;
 
-import dev.nearlimit.simulation.ErrorRateIntervals;
-import dev.nearlimit.simulation.Interval;
 import dev.nearlimit.simulation.PointCounts;
 import dev.nearlimit.simulation.StoppingRule;
 import dev.nearlimit.simulation.search.ErrorRateMeter;
 import dev.nearlimit.simulation.search.MeasuredPoint;
 import dev.nearlimit.simulation.search.NeededEbn0;
 import dev.nearlimit.simulation.search.NeededEbn0Search;
+import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
+import dev.nearlimit.simulation.statistics.Interval;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
@@ -56,7 +56,7 @@ public final class CurveSearch {
     /** Tries the contender at one Eb/N0 with a few dozen frame errors. */
     public Trial trial(double ebn0Db) {
         MeasuredPoint point = measure(ebn0Db, COARSE_ERRORS);
-        Interval fer = ErrorRateIntervals.fer(point.counts(), point.rule(), 0.95);
+        Interval fer = new ErrorRateIntervals().frameErrorRate(point.counts(), point.rule());
         return new Trial(point, fer, fer.low() > targetFer);
     }
 

@@ -1,7 +1,7 @@
 package dev.nearlimit.shortlist.requirement;
 
 import dev.nearlimit.codes.Code;
-import dev.nearlimit.decoders.DecoderChoice;
+import dev.nearlimit.decoders.catalogue.DecoderChoice;
 import java.util.List;
 
 /**

@@ -1,10 +1,10 @@
 package dev.nearlimit.simulation.search;
 
-import dev.nearlimit.simulation.ErrorRateIntervals;
-import dev.nearlimit.simulation.Interval;
 import dev.nearlimit.simulation.InvalidSimulationException;
 import dev.nearlimit.simulation.PointCounts;
 import dev.nearlimit.simulation.StoppingRule;
+import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
+import dev.nearlimit.simulation.statistics.Interval;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.TreeMap;
@@ -23,7 +23,7 @@ import java.util.TreeMap;
  * 0.2 dB of a refined bracket for waterfalls bending by less than 5 decades a squared dB.
  */
 public final class NeededEbn0Search {
-    private static final double CONFIDENCE = 0.975;
+    private static final ErrorRateIntervals INTERVALS = new ErrorRateIntervals(0.975);
     private static final long BRACKET_GRID_MICRO_DB = 250_000;
     private static final long REFINED_GRID_MICRO_DB = 50_000;
     private static final long REFINED_WIDTH_MICRO_DB = 200_000;
@@ -189,8 +189,8 @@ public final class NeededEbn0Search {
         double atUpper = Math.log10(visibleFer(upper));
         double slope = (atUpper - atLower) / (x1 - x0);
         double target = Math.log10(targetFer);
-        Interval lowerFer = ErrorRateIntervals.fer(lower.counts(), lower.rule(), CONFIDENCE);
-        Interval upperFer = ErrorRateIntervals.fer(upper.counts(), upper.rule(), CONFIDENCE);
+        Interval lowerFer = INTERVALS.frameErrorRate(lower.counts(), lower.rule());
+        Interval upperFer = INTERVALS.frameErrorRate(upper.counts(), upper.rule());
         double estimate = x0 + (target - atLower) / slope;
         double low = crossing(x0, Math.log10(lowerFer.low()), x1, log10(upperFer.low()), slope, target);
         double high = crossing(x0, Math.log10(lowerFer.high()), x1, log10(upperFer.high()), slope, target);
