@@ -15,28 +15,31 @@ public final class Main {
         int code;
         try (StandardStream out = StandardStream.output();
                 StandardStream err = StandardStream.error()) {
-            code = run(args, out, err);
+            code = run(args, out, err, interruption);
         }
         interruption.commandFinished();
         // Returning is not enough: the exit code has to be given, and worker threads must not hold the process.
         System.exit(code);
     }
 
-    private static int run(String[] args, StandardStream out, StandardStream err) {
+    private static int run(String[] args, StandardStream out, StandardStream err, Interruption interruption) {
+        Session session = new Session(Boolean.getBoolean("nearlimit.terminal"), interruption);
         PrintWriter errors = err.writer();
         int code;
         try {
-            code = NearlimitCommand.commandLine(out.writer(), errors).execute(args);
+            code = NearlimitCommand.commandLine(session, out.writer(), errors).execute(args);
             out.writer().flush();
         } catch (OutOfMemoryError e) {
             // The heap is whole again here: what filled it hung on the command that has just been left.
-            Failure failure = Failure.of("out of memory at " + (Runtime.getRuntime().maxMemory() >> 20)
-                    + " MiB; NEARLIMIT_HEAP=<size>, such as 8g, raises the ceiling");
+            Failure failure =
+                    Failure.of("out of memory at " + (Runtime.getRuntime().maxMemory() >> 20)
+                            + " MiB; NEARLIMIT_HEAP=<size>, such as 8g, raises the ceiling");
             ErrorLine.of(args).print(failure, e, errors);
             code = ExitCode.TOOL_FAILED;
         }
         if (out.failure().isPresent()) {
-            Failure failure = Failure.of("cannot write standard output: " + out.failure().get());
+            Failure failure =
+                    Failure.of("cannot write standard output: " + out.failure().get());
             ErrorLine.of(args).print(failure, null, errors);
             return ExitCode.TOOL_FAILED;
         }

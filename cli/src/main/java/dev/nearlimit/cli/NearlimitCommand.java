@@ -1,6 +1,7 @@
 package dev.nearlimit.cli;
 
 import dev.nearlimit.cli.command.CodesCommand;
+import dev.nearlimit.cli.command.InspectCommand;
 import dev.nearlimit.cli.command.LimitCommand;
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
@@ -45,8 +46,8 @@ public final class NearlimitCommand implements Runnable {
     private NearlimitCommand() {}
 
     /** All commands; a new one is added here and nowhere else. */
-    private static List<Object> commands() {
-        return List.of(new CodesCommand(), new LimitCommand());
+    private static List<Object> commands(Session session) {
+        return List.of(new CodesCommand(), new InspectCommand(session), new LimitCommand());
     }
 
     /**
@@ -55,23 +56,21 @@ public final class NearlimitCommand implements Runnable {
      * @param out where results go
      * @param err where errors and progress go
      */
-    public static CommandLine commandLine(PrintWriter out, PrintWriter err) {
+    public static CommandLine commandLine(Session session, PrintWriter out, PrintWriter err) {
         CommandLine root = new CommandLine(new NearlimitCommand());
         CommandSpec spec = root.getCommandSpec();
         spec.usageMessage()
-                .description(
-                        "Which error-correcting code comes closest to what physics allows on a given link, "
-                                + "what its decoder costs, and whether the decoder delivers it.")
-                .footer(
-                        "%nExample:%n  nearlimit limit --rate 1/2 --modulation qpsk%n"
-                                + "nearlimit COMMAND --help shows what a command takes, with an example.");
+                .description("Which error-correcting code comes closest to what physics allows on a given link, "
+                        + "what its decoder costs, and whether the decoder delivers it.")
+                .footer("%nExample:%n  nearlimit limit --rate 1/2 --modulation qpsk%n"
+                        + "nearlimit COMMAND --help shows what a command takes, with an example.");
         // Read from the raw arguments (ErrorLine), so that it holds where they cannot be parsed, too.
         spec.addOption(OptionSpec.builder("--debug")
                 .type(boolean.class)
                 .scopeType(ScopeType.INHERIT)
                 .description("On failure print the stack trace as well.")
                 .build());
-        for (Object command : commands()) {
+        for (Object command : commands(session)) {
             root.addSubcommand(command);
         }
         root.setCaseInsensitiveEnumValuesAllowed(true);
@@ -89,8 +88,8 @@ public final class NearlimitCommand implements Runnable {
     public void run() {
         throw new ParameterException(
                 spec.commandLine(),
-                "no command given; known are " + String.join(", ", spec.subcommands().keySet())
-                        + " (see nearlimit --help)");
+                "no command given; known are "
+                        + String.join(", ", spec.subcommands().keySet()) + " (see nearlimit --help)");
     }
 
     private static int badArguments(ParameterException e, String[] args) {

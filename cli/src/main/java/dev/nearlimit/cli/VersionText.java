@@ -1,5 +1,6 @@
 package dev.nearlimit.cli;
 
+import dev.nearlimit.numerics.kernels.Kernels;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -30,6 +31,6 @@ public final class VersionText implements IVersionProvider {
 
     /** Which kernels do the arithmetic. */
     public static String kernels() {
-        return "plain";
+        return Kernels.name();
     }
 }

@@ -60,8 +60,7 @@ public final class CodesCommand implements Callable<Integer> {
     }
 
     private static Stream<ListedCode> listed(Catalogue catalogue, CodeFamily family) {
-        return family.listed().stream()
-                .map(designator -> ListedCode.of(family.name(), catalogue.build(designator)));
+        return family.listed().stream().map(designator -> ListedCode.of(family.name(), catalogue.build(designator)));
     }
 
     private List<CodeFamily> families(Catalogue catalogue) {

@@ -8,9 +8,10 @@ import dev.nearlimit.cli.output.Numbers;
 import dev.nearlimit.cli.output.Presentation;
 import dev.nearlimit.cli.output.TextTable;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.stream.Collectors;
+import java.util.Set;
 
 /**
  * The list of codes as a result to show.
@@ -39,16 +40,20 @@ record CodesReport(List<ListedCode> codes) implements Presentation {
                             ? String.valueOf(code.minimumDistance().getAsInt())
                             : Numbers.UNKNOWN);
         }
-        return table + "\n" + sources() + "\nOther members of a family are named the same way; a distance shown as - may be\n"
+        return table + "\n" + sources()
+                + "\nOther members of a family are named the same way; a distance shown as - may be\n"
                 + "computed by nearlimit inspect CODE.\n";
     }
 
     /** Where each family comes from, once. */
     private String sources() {
-        Map<String, String> byFamily = codes.stream()
-                .collect(Collectors.toMap(ListedCode::family, ListedCode::source, (a, b) -> a, LinkedHashMap::new));
+        Map<String, Set<String>> byFamily = new LinkedHashMap<>();
+        for (ListedCode code : codes) {
+            byFamily.computeIfAbsent(code.family(), family -> new LinkedHashSet<>())
+                    .add(code.source());
+        }
         TextTable table = new TextTable().words("family").words("source");
-        byFamily.forEach(table::row);
+        byFamily.forEach((family, sources) -> table.row(family, String.join("; ", sources)));
         return table.toString();
     }
 

@@ -12,8 +12,10 @@ import java.util.OptionalInt;
  */
 record ListedCode(String designator, String family, int n, int k, OptionalInt minimumDistance, String source) {
     static ListedCode of(String family, Code code) {
-        OptionalInt distance =
-                code.knownDistance().map(KnownDistance::value).map(OptionalInt::of).orElse(OptionalInt.empty());
+        OptionalInt distance = code.knownDistance()
+                .map(KnownDistance::value)
+                .map(OptionalInt::of)
+                .orElse(OptionalInt.empty());
         return new ListedCode(code.designator(), family, code.n(), code.k(), distance, code.source());
     }
 

@@ -1,11 +1,14 @@
 package dev.nearlimit.cli.failure;
 
+import dev.nearlimit.algebra.weight.InfeasibleEnumerationException;
 import dev.nearlimit.cli.ExitCode;
 import dev.nearlimit.codes.InvalidCodeException;
+import dev.nearlimit.codes.matrix.MatrixFormatException;
 import dev.nearlimit.decoders.InvalidDecoderException;
 import dev.nearlimit.limits.InvalidLimitException;
 import dev.nearlimit.simulation.InvalidSimulationException;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 
 /**
  * A failure in the terms in which it is reported.
@@ -19,6 +22,7 @@ import java.util.List;
 public record Failure(String message, String file, int line, int column, int exitCode) {
     /** User mistakes that the rooms report; whatever else is thrown is a defect of the tool. */
     private static final List<Class<? extends RuntimeException>> USER_MISTAKES = List.of(
+            InfeasibleEnumerationException.class,
             InvalidCodeException.class,
             InvalidDecoderException.class,
             InvalidLimitException.class,
@@ -32,8 +36,14 @@ public record Failure(String message, String file, int line, int column, int exi
     /** What an exception means for the user. */
     public static Failure of(Exception e) {
         if (e instanceof InputException input) {
-            return new Failure(
-                    input.getMessage(), input.file(), input.line(), input.column(), ExitCode.BAD_INPUT);
+            return new Failure(input.getMessage(), input.file(), input.line(), input.column(), ExitCode.BAD_INPUT);
+        }
+        if (e instanceof MatrixFormatException matrix) {
+            String message = "found " + matrix.found() + ", expected " + matrix.expected();
+            return new Failure(message, matrix.file(), matrix.line(), matrix.column(), ExitCode.BAD_INPUT);
+        }
+        if (e instanceof CancellationException) {
+            return new Failure("interrupted", null, 0, 0, ExitCode.INTERRUPTED);
         }
         if (USER_MISTAKES.stream().anyMatch(kind -> kind.isInstance(e))) {
             return new Failure(e.getMessage(), null, 0, 0, ExitCode.BAD_INPUT);

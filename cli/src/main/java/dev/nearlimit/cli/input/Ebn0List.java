@@ -34,7 +34,8 @@ public record Ebn0List(List<Long> microDb) {
             } else if (ends.length == 3) {
                 values.addAll(range(part, microDb(ends[0]), microDb(ends[1]), microDb(ends[2])));
             } else {
-                throw new InputException("'" + part + "' is no range of Eb/N0; expected start:step:end, such as 1:0.5:3");
+                throw new InputException(
+                        "'" + part + "' is no range of Eb/N0; expected start:step:end, such as 1:0.5:3");
             }
         }
         if (values.size() > MOST) {

@@ -27,14 +27,17 @@ public record Fraction(double value, String text) {
             }
             return new Fraction(Double.parseDouble(quotient.group(1)) / below.doubleValue(), text);
         }
-        if (text.isEmpty() || !Character.isDigit(text.charAt(text.length() - 1)) || !DECIMAL.matcher(text).matches()) {
+        if (text.isEmpty()
+                || !Character.isDigit(text.charAt(text.length() - 1))
+                || !DECIMAL.matcher(text).matches()) {
             throw unusable(text);
         }
         return new Fraction(new BigDecimal(text).doubleValue(), text);
     }
 
     private static InputException unusable(String text) {
-        return new InputException("'" + text + "' is no ratio; expected a fraction such as 1/2 or a number such as 0.5");
+        return new InputException(
+                "'" + text + "' is no ratio; expected a fraction such as 1/2 or a number such as 0.5");
     }
 
     /** For options. */

@@ -10,7 +10,8 @@ import org.apache.commons.csv.CSVPrinter;
 
 /** CSV as in RFC 4180, but with line feeds alone: a heading line, then records. Unknown values are empty. */
 public final class CsvText {
-    private static final CSVFormat FORMAT = CSVFormat.DEFAULT.builder()
+    private static final CSVFormat FORMAT = CSVFormat.DEFAULT
+            .builder()
             .setRecordSeparator('\n')
             .setNullString("")
             .get();

@@ -26,12 +26,11 @@ public final class OutputOptions {
 
     /** Shows a result where and as the user asked for it. */
     public void show(Presentation result) {
-        String text =
-                switch (format) {
-                    case TABLE -> result.table();
-                    case CSV -> result.csv().toString();
-                    case JSON -> JsonText.of(result.json());
-                };
+        String text = switch (format) {
+            case TABLE -> result.table();
+            case CSV -> result.csv().toString();
+            case JSON -> JsonText.of(result.json());
+        };
         if (out != null) {
             OutputFile.write(out, text);
             return;

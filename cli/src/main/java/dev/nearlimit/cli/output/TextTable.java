@@ -67,10 +67,9 @@ public final class TextTable {
         int[] widths = new int[columns.size()];
         for (int c = 0; c < widths.length; c++) {
             int column = c;
-            int heading = Math.max(columns.get(c).name().length(), columns.get(c).unit().length());
-            widths[c] = rows.stream()
-                    .mapToInt(row -> row.get(column).length())
-                    .reduce(heading, Math::max);
+            int heading = Math.max(
+                    columns.get(c).name().length(), columns.get(c).unit().length());
+            widths[c] = rows.stream().mapToInt(row -> row.get(column).length()).reduce(heading, Math::max);
         }
         int last = widths.length - 1;
         int before = IntStream.of(widths).limit(last).map(w -> w + GAP.length()).sum();

@@ -7,8 +7,11 @@ import dev.nearlimit.limits.Modulation;
 
 /** What a product would ship, and the channel that it is tried on. */
 public record Scheme(Code code, DecoderSettings decoder, Modulation modulation, Quantiser quantiser, Channel channel) {
-    /** Signal-to-noise ratio per real dimension, E_s/N_0 in one dimension over 1: R * Eb/N0, linear. */
+    /**
+     * Energy of a real dimension over N0, linear: R * Eb/N0. StrictMath, because it enters every received value and must
+     * be the same on every machine.
+     */
     public double energyPerDimensionOverN0(double ebn0Db) {
-        return code.rate().value() * Math.pow(10, ebn0Db / 10);
+        return code.rate().value() * StrictMath.pow(10, ebn0Db / 10);
     }
 }

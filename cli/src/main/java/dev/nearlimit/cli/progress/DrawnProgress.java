@@ -1,0 +1,60 @@
+package dev.nearlimit.cli.progress;
+
+import java.io.FileDescriptor;
+import java.io.FileOutputStream;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
+import me.tongfei.progressbar.ConsoleProgressBarConsumer;
+import me.tongfei.progressbar.ProgressBar;
+import me.tongfei.progressbar.ProgressBarBuilder;
+import me.tongfei.progressbar.ProgressBarStyle;
+
+/** A bar with an estimate of the time left, drawn in place on standard error and taken away at the end. */
+final class DrawnProgress implements Progress {
+    private static final int STEPS = 1000;
+    private static final int WIDTH = 79;
+    private static final int REDRAW_MS = 250;
+    /** Work that ends sooner shows nothing. */
+    private static final long PATIENCE_NS = 1_000_000_000L;
+
+    private final String task;
+    private final long start = System.nanoTime();
+    private ProgressBar bar;
+
+    DrawnProgress(String task) {
+        this.task = task;
+    }
+
+    @Override
+    public void at(double fraction, String detail) {
+        if (bar == null) {
+            if (System.nanoTime() - start < PATIENCE_NS) {
+                return;
+            }
+            bar = newBar();
+        }
+        bar.stepTo(Math.round(STEPS * fraction));
+        bar.setExtraMessage(" " + detail);
+    }
+
+    private ProgressBar newBar() {
+        PrintStream terminal = new PrintStream(new FileOutputStream(FileDescriptor.err), true, StandardCharsets.UTF_8);
+        return new ProgressBarBuilder()
+                .setTaskName(task)
+                .setInitialMax(STEPS)
+                .setStyle(ProgressBarStyle.ASCII)
+                .setUpdateIntervalMillis(REDRAW_MS)
+                .setUnit(" %", STEPS / 100)
+                .startsFrom(0, java.time.Duration.ofNanos(System.nanoTime() - start))
+                .setConsumer(new ConsoleProgressBarConsumer(terminal, WIDTH))
+                .clearDisplayOnFinish()
+                .build();
+    }
+
+    @Override
+    public void close() {
+        if (bar != null) {
+            bar.close();
+        }
+    }
+}

@@ -1,0 +1,52 @@
+package dev.nearlimit.simulation.link;
+
+import dev.nearlimit.codes.batch.FrameBatch;
+import dev.nearlimit.decoders.batch.LlrBatch;
+import dev.nearlimit.numerics.noise.GaussianNoise;
+
+/**
+ * Antipodal signalling in white Gaussian noise: code bit i of a frame takes real dimension i, y = (1 - 2b) + sigma z
+ * with z sample i of the frame's noise, and the LLR is 2 y / sigma^2. BPSK sends dimension i as symbol i; QPSK sends
+ * dimensions 2j and 2j + 1 as the two axes of symbol j, the second axis of a last symbol staying empty when n is odd. So
+ * both modulations meet the same noise bit by bit.
+ *
+ * <p>With E the energy of a dimension over N0 (E = R Eb/N0), sigma = (float) sqrt(1 / (2E)) and the LLR is
+ * (float) (4E) * y; sums and products are single precision, each rounded.
+ */
+public final class GaussianLink implements Link {
+    private final GaussianNoise noise;
+    private final float sigma;
+    private final float llrOfUnit;
+
+    /**
+     * A link for one point.
+     *
+     * @param noise the point's noise
+     * @param energyOverN0 energy of a real dimension over N0, linear, above 0
+     */
+    public GaussianLink(GaussianNoise noise, double energyOverN0) {
+        this.noise = noise;
+        this.sigma = sigma(energyOverN0);
+        this.llrOfUnit = (float) (4 * energyOverN0);
+    }
+
+    /** Standard deviation of the noise in a dimension whose signal is +-1. */
+    static float sigma(double energyOverN0) {
+        return (float) Math.sqrt(1 / (2 * energyOverN0));
+    }
+
+    @Override
+    public void carry(long firstFrame, long[] codeword, LlrBatch received) {
+        float[] values = received.values();
+        noise.fill(firstFrame, values, received.n());
+        for (int i = 0; i < received.n(); i++) {
+            demap(codeword[i], values, i * FrameBatch.FRAMES);
+        }
+    }
+
+    private void demap(long bits, float[] values, int at) {
+        for (int f = 0; f < FrameBatch.FRAMES; f++) {
+            values[at + f] = (Antipodal.signal(bits, f) + sigma * values[at + f]) * llrOfUnit;
+        }
+    }
+}
