@@ -5,7 +5,10 @@ import dev.nearlimit.codes.Code;
 import dev.nearlimit.codes.catalogue.Catalogue;
 import dev.nearlimit.codes.family.CodeFamily;
 import dev.nearlimit.codes.matrix.MatrixFile;
+import dev.nearlimit.codes.matrix.MatrixLimits;
 import dev.nearlimit.codes.matrix.MatrixRole;
+import dev.nearlimit.decoders.DecoderFamily;
+import dev.nearlimit.decoders.catalogue.DecoderCatalogue;
 import dev.nearlimit.decoders.catalogue.DecoderChoice;
 import dev.nearlimit.decoders.catalogue.DecoderDesignator;
 import dev.nearlimit.shortlist.requirement.Candidate;
@@ -84,7 +87,7 @@ final class CandidateReader {
         if (fields.has("matrix")) {
             MatrixRole role = role(fields);
             Path file = folder.resolve(designator);
-            return new Named(fields.located(place, () -> MatrixFile.code(file, role)), "matrix");
+            return new Named(fields.located(place, () -> MatrixFile.readCode(file, role, MatrixLimits.standard())), "matrix");
         }
         String family = designator.split(":", 2)[0];
         return new Named(fields.located(place, () -> catalogue.build(designator)), family);
@@ -101,10 +104,11 @@ final class CandidateReader {
     }
 
     private static void requireFit(FieldReader fields, YamlNode place, DecoderChoice choice, Code code) {
-        choice.objection(code).ifPresent(why -> {
+        DecoderFamily family = DecoderCatalogue.standard().family(choice.decoder().family());
+        family.objection(code).ifPresent(why -> {
             throw fields.at(
                     place,
-                    "decoder " + choice.decoder().family() + " does not fit " + code.designator() + ": " + why);
+                    "decoder " + family.name() + " does not fit " + code.designator() + ": " + why);
         });
     }
 }
