@@ -10,6 +10,14 @@ public interface Quantiser {
     /** Bits of a level; 0 where values pass unquantised. */
     int wordBits();
 
+    /**
+     * Magnitude of the outermost level, in the integers of {@link dev.nearlimit.decoders.batch.LlrBatch#levels()}; 0
+     * where values pass unquantised. Unless overridden that of a mid-tread quantiser, 2^(b-1)-1.
+     */
+    default int largestLevel() {
+        return wordBits() == 0 ? 0 : (1 << (wordBits() - 1)) - 1;
+    }
+
     /** Fills the batch's levels from its values and overwrites the values with what the levels stand for. */
     void apply(LlrBatch batch);
 }

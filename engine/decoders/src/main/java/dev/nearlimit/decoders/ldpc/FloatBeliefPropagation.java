@@ -1,0 +1,115 @@
+package dev.nearlimit.decoders.ldpc;
+
+import dev.nearlimit.codes.batch.FrameBatch;
+import dev.nearlimit.codes.gf2.SparseBitMatrix;
+import dev.nearlimit.decoders.batch.LlrBatch;
+import java.util.Arrays;
+
+/**
+ * Belief propagation in single precision with any check rule. A check reads from each of its bits t = posterior - its own
+ * last message to it; the rule makes new messages, which are limited to -{@value #LARGEST} .. {@value #LARGEST}; and
+ *
+ * <ul>
+ *   <li>layered: the posterior becomes t plus the new message before the next row reads it;
+ *   <li>flooding: the posterior becomes the channel's LLR plus all new messages, added in the order of the rows.
+ * </ul>
+ *
+ * The channel's LLRs are limited likewise, so that nothing ever overflows; both limits are far beyond any LLR that
+ * matters to a decision. Every operation is an addition, subtraction, multiplication, minimum or maximum in single
+ * precision, and no lane sees another, so that any kernel gives the same bits. No posterior is ever -0: the channel's
+ * are made +0, and a sum or difference of other values is -0 only if both operands vanish with that sign.
+ */
+final class FloatBeliefPropagation extends BeliefPropagation {
+    /** Largest magnitude of a channel LLR and of a message. */
+    static final float LARGEST = 1024f;
+
+    private final RowRuns runs;
+    private final boolean layered;
+    private final FloatCheckRule rule;
+    private final float[] channel;
+    private final float[] message;
+    private final float[] incoming;
+    private float[] posterior;
+    private float[] sum;
+
+    FloatBeliefPropagation(SparseBitMatrix matrix, Iterations iterations, RowRuns runs, FloatCheckRule rule) {
+        super(matrix, iterations);
+        this.runs = runs;
+        this.layered = iterations.schedule() == Schedule.LAYERED;
+        this.rule = rule;
+        this.posterior = new float[matrix.columns() * FrameBatch.FRAMES];
+        this.message = new float[Math.multiplyExact(matrix.ones(), FrameBatch.FRAMES)];
+        this.channel = new float[layered ? 0 : posterior.length];
+        this.sum = new float[layered ? 0 : posterior.length];
+        this.incoming = new float[runs.largestDegree() * RowRuns.MOST_ROWS * FrameBatch.FRAMES];
+    }
+
+    @Override
+    void load(LlrBatch received) {
+        float[] values = received.values();
+        for (int i = 0; i < posterior.length; i++) {
+            // Adding +0 turns -0 into +0.
+            posterior[i] = Math.max(-LARGEST, Math.min(LARGEST, values[i])) + 0f;
+        }
+        System.arraycopy(posterior, 0, channel, 0, channel.length);
+        Arrays.fill(message, 0f);
+    }
+
+    @Override
+    void iterate() {
+        System.arraycopy(channel, 0, sum, 0, sum.length);
+        int messagesOfRun = 0;
+        for (int run = 0; run < runs.count(); run++) {
+            int lanes = runs.rows(run) * FrameBatch.FRAMES;
+            int degree = runs.degree(run);
+            for (int i = 0; i < degree; i++) {
+                int bits = runs.column(run, i) * FrameBatch.FRAMES;
+                subtract(posterior, bits, message, messagesOfRun + i * lanes, incoming, i * lanes, lanes);
+            }
+            rule.apply(incoming, degree, lanes, message, messagesOfRun);
+            limit(message, messagesOfRun, degree * lanes);
+            for (int i = 0; i < degree; i++) {
+                int bits = runs.column(run, i) * FrameBatch.FRAMES;
+                if (layered) {
+                    add(incoming, i * lanes, message, messagesOfRun + i * lanes, posterior, bits, lanes);
+                } else {
+                    add(sum, bits, message, messagesOfRun + i * lanes, sum, bits, lanes);
+                }
+            }
+            messagesOfRun += degree * lanes;
+        }
+        if (!layered) {
+            float[] old = posterior;
+            posterior = sum;
+            sum = old;
+        }
+    }
+
+    @Override
+    long hardDecisions(int position) {
+        int at = position * FrameBatch.FRAMES;
+        long word = 0;
+        for (int f = 0; f < FrameBatch.FRAMES; f++) {
+            word |= (Float.floatToRawIntBits(posterior[at + f]) >>> 31 & 1L) << f;
+        }
+        return word;
+    }
+
+    private static void subtract(float[] a, int aFrom, float[] b, int bFrom, float[] result, int from, int lanes) {
+        for (int f = 0; f < lanes; f++) {
+            result[from + f] = a[aFrom + f] - b[bFrom + f];
+        }
+    }
+
+    private static void add(float[] a, int aFrom, float[] b, int bFrom, float[] result, int from, int lanes) {
+        for (int f = 0; f < lanes; f++) {
+            result[from + f] = a[aFrom + f] + b[bFrom + f];
+        }
+    }
+
+    private static void limit(float[] values, int from, int count) {
+        for (int f = 0; f < count; f++) {
+            values[from + f] = Math.max(-LARGEST, Math.min(LARGEST, values[from + f]));
+        }
+    }
+}

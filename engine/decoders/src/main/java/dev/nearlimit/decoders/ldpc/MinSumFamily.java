@@ -1,0 +1,82 @@
+package dev.nearlimit.decoders.ldpc;
+
+import dev.nearlimit.codes.Code;
+import dev.nearlimit.decoders.DecoderFamily;
+import dev.nearlimit.decoders.DecoderSettings;
+import dev.nearlimit.decoders.InvalidDecoderException;
+import dev.nearlimit.decoders.Quantiser;
+import dev.nearlimit.decoders.setting.SettingHelp;
+import dev.nearlimit.decoders.setting.SettingReader;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** {@code min-sum}: in fixed point when a quantiser is chosen with {@code word=}, in single precision otherwise. */
+public final class MinSumFamily implements DecoderFamily {
+    /** Common practice for normalised min-sum on codes with row weights of 6 to 8. */
+    private static final MagnitudeCorrection STANDARD = new MagnitudeCorrection.Scale(6);
+
+    @Override
+    public String name() {
+        return MinSumSettings.NAME;
+    }
+
+    @Override
+    public String title() {
+        return "belief propagation with minima, normalised or offset, single precision or fixed point";
+    }
+
+    @Override
+    public List<SettingHelp> settings() {
+        List<SettingHelp> all = new ArrayList<>(Iterations.settings());
+        all.add(new SettingHelp("scale", "1/8..8/8", STANDARD.designator(), "factor on check messages"));
+        all.add(new SettingHelp("offset", "number", "none", "taken off check messages [LLR units; levels with word=]"));
+        all.add(new SettingHelp("message-word", "2..8", "bits of a level", "bits of a message; needs word="));
+        all.add(new SettingHelp("posterior-word", "..15", "message-word + 2", "bits of a posterior; needs word="));
+        return all;
+    }
+
+    @Override
+    public boolean soft() {
+        return true;
+    }
+
+    @Override
+    public DecoderSettings read(SettingReader reader, Quantiser quantiser) {
+        reader.refuseTogether("scale", "offset");
+        Iterations iterations = Iterations.take(reader);
+        boolean fixedPoint = quantiser.wordBits() > 0;
+        Optional<Integer> scale = reader.eighths("scale");
+        Optional<Float> offset = reader.number("offset", 0, MagnitudeCorrection.Offset.LARGEST);
+        MagnitudeCorrection correction = scale.<MagnitudeCorrection>map(MagnitudeCorrection.Scale::new)
+                .or(() -> offset.map(MagnitudeCorrection.Offset::new))
+                .orElse(STANDARD);
+        return new MinSumSettings(
+                iterations, correction, fixedPoint ? Optional.of(words(reader, quantiser)) : none(reader));
+    }
+
+    private static WordLengths words(SettingReader reader, Quantiser quantiser) {
+        int bitsOfLevel = 33 - Integer.numberOfLeadingZeros(quantiser.largestLevel());
+        int message =
+                reader.whole("message-word", 2, WordLengths.LARGEST_MESSAGE).orElse(bitsOfLevel);
+        int shortest = Math.max(message, bitsOfLevel);
+        int posterior = reader.whole("posterior-word", shortest, WordLengths.LARGEST_POSTERIOR)
+                .orElse(shortest + 2);
+        return new WordLengths(message, posterior);
+    }
+
+    private static Optional<WordLengths> none(SettingReader reader) {
+        for (String key : List.of("message-word", "posterior-word")) {
+            if (reader.has(key)) {
+                throw new InvalidDecoderException(
+                        key + " of " + MinSumSettings.NAME + " needs word=, the bits of the quantised LLR, beside it");
+            }
+        }
+        return Optional.empty();
+    }
+
+    @Override
+    public Optional<String> objection(Code code) {
+        return MessageMemory.objection(code);
+    }
+}

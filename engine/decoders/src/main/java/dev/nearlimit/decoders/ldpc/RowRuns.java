@@ -1,0 +1,101 @@
+package dev.nearlimit.decoders.ldpc;
+
+import dev.nearlimit.codes.gf2.SparseBitMatrix;
+
+/**
+ * The rows of a parity-check matrix gathered into runs that may be done together: within a run every row is the row
+ * before it moved one column to the right, and no two rows share a column, so that the i-th edges of all its rows lie
+ * side by side in position-major arrays and the rows do not see each other's results. Quasi-cyclic matrices have long
+ * runs; any other matrix has runs of one row. The order of rows and of edges is that of the matrix.
+ *
+ * <p>Rows without ones are left out: they are always satisfied. Messages of a run are kept edge by edge: i-th edges of
+ * all its rows, then the next.
+ */
+final class RowRuns {
+    /** Rows in a run at most: their soft values of one edge then fill 2 KB, so that a run's work stays in the L1 cache. */
+    static final int MOST_ROWS = 8;
+
+    private final int count;
+    private final int[] rows;
+    private final int[] degree;
+    private final int[] firstEdge;
+    private final int[] column;
+    private int largestDegree;
+
+    RowRuns(SparseBitMatrix matrix) {
+        int[] rowsOfRun = new int[matrix.rows()];
+        int[] degreeOfRun = new int[matrix.rows()];
+        int[] firstRow = new int[matrix.rows()];
+        int[] seenInRun = new int[matrix.columns()];
+        int runs = 0;
+        for (int r = 0; r < matrix.rows(); r++) {
+            if (matrix.rowWeight(r) == 0) {
+                continue;
+            }
+            boolean extend = runs > 0
+                    && firstRow[runs - 1] + rowsOfRun[runs - 1] == r
+                    && rowsOfRun[runs - 1] < MOST_ROWS
+                    && follows(matrix, r, seenInRun, runs);
+            if (!extend) {
+                firstRow[runs] = r;
+                degreeOfRun[runs] = matrix.rowWeight(r);
+                runs++;
+            }
+            rowsOfRun[runs - 1]++;
+            for (int i = 0; i < matrix.rowWeight(r); i++) {
+                seenInRun[matrix.column(r, i)] = runs;
+            }
+            largestDegree = Math.max(largestDegree, matrix.rowWeight(r));
+        }
+        count = runs;
+        rows = rowsOfRun;
+        degree = degreeOfRun;
+        firstEdge = new int[runs];
+        int[] columns = new int[matrix.ones()];
+        int edges = 0;
+        for (int run = 0; run < runs; run++) {
+            firstEdge[run] = edges;
+            for (int i = 0; i < degree[run]; i++) {
+                columns[edges + i] = matrix.column(firstRow[run], i);
+            }
+            edges += degree[run];
+        }
+        column = columns;
+    }
+
+    private static boolean follows(SparseBitMatrix matrix, int row, int[] seenInRun, int run) {
+        if (matrix.rowWeight(row) != matrix.rowWeight(row - 1)) {
+            return false;
+        }
+        for (int i = 0; i < matrix.rowWeight(row); i++) {
+            int wanted = matrix.column(row, i);
+            if (wanted != matrix.column(row - 1, i) + 1 || seenInRun[wanted] == run) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    int count() {
+        return count;
+    }
+
+    /** Rows of a run, 1 .. {@link #MOST_ROWS}. */
+    int rows(int run) {
+        return rows[run];
+    }
+
+    /** Ones of each row of a run. */
+    int degree(int run) {
+        return degree[run];
+    }
+
+    /** Column of the i-th one of a run's first row. */
+    int column(int run, int i) {
+        return column[firstEdge[run] + i];
+    }
+
+    int largestDegree() {
+        return largestDegree;
+    }
+}

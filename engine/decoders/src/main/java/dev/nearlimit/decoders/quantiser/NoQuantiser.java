@@ -1,0 +1,22 @@
+package dev.nearlimit.decoders.quantiser;
+
+import dev.nearlimit.decoders.Quantiser;
+import dev.nearlimit.decoders.batch.LlrBatch;
+
+/** Values pass in single precision; levels are left alone. */
+public record NoQuantiser() implements Quantiser {
+    @Override
+    public String designator() {
+        return "none";
+    }
+
+    @Override
+    public int wordBits() {
+        return 0;
+    }
+
+    @Override
+    public void apply(LlrBatch batch) {
+        // Nothing to do: the decoder sees the LLRs as they are.
+    }
+}
