@@ -6,6 +6,7 @@ import dev.nearlimit.cli.command.LimitCommand;
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
 import dev.nearlimit.cli.failure.ParseFailure;
+import dev.nearlimit.cli.shortlist.ShortlistCommand;
 import java.io.PrintWriter;
 import java.util.List;
 import picocli.CommandLine;
@@ -47,7 +48,7 @@ public final class NearlimitCommand implements Runnable {
 
     /** All commands; a new one is added here and nowhere else. */
     private static List<Object> commands(Session session) {
-        return List.of(new CodesCommand(), new InspectCommand(session), new LimitCommand());
+        return List.of(new ShortlistCommand(session), new CodesCommand(), new InspectCommand(session), new LimitCommand());
     }
 
     /**

@@ -107,7 +107,7 @@ public final class CosetLeaders {
                     }
                 }
             }
-            counts[weight] = count - levelEnd;
+            counts[weight] = (long) count - levelEnd;
             levelStart = levelEnd;
         }
         return Arrays.copyOf(counts, weight + 1);

@@ -13,8 +13,7 @@ import java.util.stream.Collectors;
 
 /** The decoders that there are. Immutable. */
 public final class DecoderCatalogue {
-    private static final DecoderCatalogue STANDARD =
-            new DecoderCatalogue(List.of(
+    private static final DecoderCatalogue STANDARD = new DecoderCatalogue(List.of(
             new SyndromeFamily(),
             new BoundedDistanceFamily(),
             new MaximumLikelihoodFamily(),

@@ -23,8 +23,8 @@ public record MaximumLikelihoodSettings() implements DecoderSettings {
 
     static Optional<String> objection(Code code) {
         if (code.k() > MOST_INFORMATION_BITS) {
-            return Optional.of("it has 2^" + code.k() + " codewords to look at; k may be at most "
-                    + MOST_INFORMATION_BITS);
+            return Optional.of(
+                    "it has 2^" + code.k() + " codewords to look at; k may be at most " + MOST_INFORMATION_BITS);
         }
         if (code.n() > MOST_POSITIONS) {
             return Optional.of("it has " + code.n() + " positions, at most " + MOST_POSITIONS + " are possible");
@@ -66,7 +66,7 @@ public record MaximumLikelihoodSettings() implements DecoderSettings {
      */
     @Override
     public OperationCount operationsPerFrame(Code code, double iterations) {
-        double groups = (code.n() + MaximumLikelihoodDecoder.GROUP - 1) / MaximumLikelihoodDecoder.GROUP;
+        double groups = Math.ceil(code.n() / (double) MaximumLikelihoodDecoder.GROUP);
         double words = 1 << code.k();
         return new OperationCount(groups * 11 + groups * words, words, 0);
     }

@@ -23,14 +23,14 @@ public record ExactErrorRate(DoubleUnaryOperator frameErrorRateAt, DoubleUnaryOp
     public static Optional<ExactErrorRate> of(Code code, DecoderSettings decoder) {
         if (decoder instanceof SyndromeSettings) {
             CosetLeaderErrorRate rate = CosetLeaderErrorRate.of(
-                    code.n(), code.k(), CosetLeaders.of(code).leadersByWeight());
+                    code.n(), code.k(), CosetLeaders.of(code).countsByWeight());
             return Optional.of(new ExactErrorRate(
                     ebn0Db -> rate.frameErrorRate(ebn0Db).value(),
                     rate::leastEbn0Db,
                     "exact: weights of all coset leaders"));
         }
-        if (decoder instanceof BoundedDistanceSettings bounded) {
-            int t = bounded.correctableErrors(code);
+        if (decoder instanceof BoundedDistanceSettings) {
+            int t = BoundedDistanceSettings.errorsCorrected(code);
             BoundedDistanceErrorRate rate = new BoundedDistanceErrorRate(code.n(), code.k(), t);
             return Optional.of(new ExactErrorRate(
                     ebn0Db -> rate.frameErrorRate(ebn0Db).value(),

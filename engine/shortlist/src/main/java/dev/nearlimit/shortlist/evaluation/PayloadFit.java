@@ -1,6 +1,7 @@
 package dev.nearlimit.shortlist.evaluation;
 
 import dev.nearlimit.codes.Code;
+import dev.nearlimit.codes.catalogue.Shortening;
 import dev.nearlimit.shortlist.requirement.Payload;
 
 /**
@@ -19,7 +20,7 @@ public record PayloadFit(Code code, int codewords, int payloadBits, double paylo
     public static PayloadFit of(Code mother, Payload payload) {
         int bits = payload.bits();
         if (mother.k() > bits) {
-            return new PayloadFit(Shortening.to(mother, bits), 1, bits, payload.fer());
+            return new PayloadFit(new Shortening(mother.k() - bits).applyTo(mother), 1, bits, payload.fer());
         }
         int codewords = (bits + mother.k() - 1) / mother.k();
         return new PayloadFit(mother, codewords, bits, payload.fer());
