@@ -1,6 +1,7 @@
 package dev.nearlimit.limits;
 
 import java.util.function.DoubleUnaryOperator;
+import org.apache.commons.math3.analysis.UnivariateFunction;
 
 /** Inverts the capacity of a binary-input channel: which Es/N0 carries a rate. */
 final class BinaryCapacity {
@@ -22,13 +23,9 @@ final class BinaryCapacity {
     static double esn0ForRate(DoubleUnaryOperator capacity, DoubleUnaryOperator loss, double lowSnrSlope, double rate) {
         // The margin makes room for rounding where the bound is all but met.
         double lowest = rate / lowSnrSlope * (1 - 1e-6);
-        if (rate < 0.5) {
-            return Math.exp(RootSearch.between(
-                    x -> Math.log(capacity.applyAsDouble(Math.exp(x)) / rate),
-                    Math.log(lowest),
-                    Math.log(HIGHEST_ESN0)));
-        }
-        return Math.exp(RootSearch.between(
-                x -> Math.log(loss.applyAsDouble(Math.exp(x)) / (1 - rate)), Math.log(lowest), Math.log(HIGHEST_ESN0)));
+        UnivariateFunction mismatch = rate < 0.5
+                ? x -> Math.log(capacity.applyAsDouble(Math.exp(x)) / rate)
+                : x -> Math.log(loss.applyAsDouble(Math.exp(x)) / (1 - rate));
+        return Math.exp(RootSearch.between(mismatch, Math.log(lowest), Math.log(HIGHEST_ESN0)));
     }
 }

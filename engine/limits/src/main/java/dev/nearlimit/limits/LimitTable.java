@@ -68,7 +68,8 @@ public final class LimitTable {
         if (ber.isPresent()) {
             rows.add(Limit.of(
                     UNCODED,
-                    "Eb/N0 of uncoded " + modulation.designator() + " at BER " + ber.getAsDouble() + ", AWGN",
+                    "Eb/N0 of uncoded " + modulation.designator() + " at BER " + probability(ber.getAsDouble())
+                            + ", AWGN",
                     "exact: closed form, BER = Q(sqrt(2 Eb/N0))",
                     UncodedBinary.ebn0DbForBitErrorRate(ber.getAsDouble()),
                     1,
@@ -98,11 +99,16 @@ public final class LimitTable {
         return Optional.of(Limit.of(
                 NORMAL_APPROXIMATION,
                 "Eb/N0 of the best code of " + uses + " channel uses and " + bits + " information bits at FER "
-                        + fer.getAsDouble() + " with " + modulation.designator() + ", AWGN",
+                        + probability(fer.getAsDouble()) + " with " + modulation.designator() + ", AWGN",
                 "estimated: normal approximation for BI-AWGN with third-order term 1/2 log2 n (Polyanskiy, Poor and"
                         + " Verdu 2010); not a bound",
                 NormalApproximation.leastEbn0Db(uses, bits, fer.getAsDouble()),
                 (double) bits / uses,
                 modulation));
+    }
+
+    /** A probability as people write it: 1e-6 rather than 1.0E-6. */
+    private static String probability(double p) {
+        return Double.toString(p).replace(".0E", "E").replace('E', 'e');
     }
 }

@@ -7,9 +7,30 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.math.BigDecimal;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class HardDecisionTest {
+    /** Es/N0 in dB, crossover probability and capacity, evaluated apart from this project in 40-digit arithmetic. */
+    @ParameterizedTest
+    @CsvSource({
+        "-30, 0.48216470413516005748, 0.00091803091559913761635",
+        "-20, 0.4437685419908575539, 0.0091428669374182901184",
+        "-10, 0.3273604230092885147, 0.087793232270064811234",
+        "-3, 0.15836831880959789772, 0.36960827369514644821",
+        "-0.86, 0.10011451443331358898, 0.53064150931467599877",
+        "-0.85, 0.099855588156271373743, 0.53146234834672446985",
+        "0, 0.078649603525142565329, 0.60259698071533060945",
+        "3, 0.02287840756108532716, 0.84268957971212061757",
+        "8, 0.00019090777407599316468, 0.99736597025243021206",
+        "12, 9.0060103506287324346e-9, 0.99999974630825569952",
+    })
+    void agreesWithFortyDigits(double esn0Db, double crossover, double capacity) {
+        double esn0 = Decibels.toLinear(esn0Db);
+        assertEquals(1, HardDecisionAwgn.crossover(esn0) / crossover, 1e-12);
+        assertEquals(1, HardDecisionAwgn.capacity(esn0) / capacity, 1e-11);
+    }
+
     @Test
     void capacityIsOneLessTheEntropy() {
         for (double p = 0.001; p < 0.5; p += 0.001) {

@@ -30,6 +30,7 @@ class LimitTableTest {
         assertEquals(HardDecisionAwgn.leastEbn0Db(0.5), rows.get(2).ebn0Db());
         assertEquals(UncodedBinary.ebn0DbForBitErrorRate(1e-6), rows.get(3).ebn0Db());
         assertEquals(NormalApproximation.leastEbn0Db(128, 64, 1e-4), rows.get(4).ebn0Db());
+        assertEquals("Eb/N0 of uncoded bpsk at BER 1e-6, AWGN", rows.get(3).definition());
         for (Limit row : rows) {
             boolean estimate = row.name().equals(LimitTable.NORMAL_APPROXIMATION);
             assertTrue(row.method().startsWith(estimate ? "estimated" : "exact"), row.method());

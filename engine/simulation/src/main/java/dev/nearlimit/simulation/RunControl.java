@@ -44,8 +44,10 @@ public record RunControl(BooleanSupplier cancelled, Progress progress, OptionalL
         return new RunControl(cancelled, progress, OptionalLong.of(System.nanoTime() + limit.toNanos()));
     }
 
-    /** Whether the run is to end now. */
+    /** Whether the run is to end now; an interrupt of the thread that asks counts as a request. */
     boolean stopRequested() {
-        return cancelled.getAsBoolean() || (deadline.isPresent() && System.nanoTime() - deadline.getAsLong() >= 0);
+        return Thread.currentThread().isInterrupted()
+                || cancelled.getAsBoolean()
+                || (deadline.isPresent() && System.nanoTime() - deadline.getAsLong() >= 0);
     }
 }

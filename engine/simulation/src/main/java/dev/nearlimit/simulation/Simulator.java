@@ -105,10 +105,7 @@ public final class Simulator {
 
     private SchemeBench bench(Scheme scheme) {
         synchronized (benches) {
-            return benches.computeIfAbsent(
-                    scheme,
-                    s -> new SchemeBench(
-                            s, framesPerBlock == 0 ? SchemeBench.defaultFramesPerBlock(s) : framesPerBlock));
+            return benches.computeIfAbsent(scheme, s -> new SchemeBench(s, framesPerBlock));
         }
     }
 

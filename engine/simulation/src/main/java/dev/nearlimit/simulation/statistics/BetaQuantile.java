@@ -4,8 +4,9 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.special.Beta;
 
 /**
- * Quantiles of the beta distribution with full relative accuracy however small they are, which the library's own
- * inverse, accurate to 1e-9 absolutely, does not give.
+ * Quantiles of the beta distribution accurate relative to their size however small they are, which the library's own
+ * inverse, accurate to 1e-9 absolutely, is not. The library's incomplete beta function forms 1 - x, so the relative
+ * error grows with a + b: it is below 1e-7 up to 1e9 and below 1e-4 up to 1e12, far less than an interval is wide.
  */
 final class BetaQuantile {
     private static final double LEAST_LOG = -700;
