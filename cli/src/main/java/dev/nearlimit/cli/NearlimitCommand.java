@@ -7,6 +7,7 @@ import dev.nearlimit.cli.command.SimulateCommand;
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
 import dev.nearlimit.cli.failure.ParseFailure;
+import dev.nearlimit.cli.shortlist.ShortlistCommand;
 import java.io.PrintWriter;
 import java.util.List;
 import picocli.CommandLine;
@@ -49,7 +50,11 @@ public final class NearlimitCommand implements Runnable {
     /** All commands; a new one is added here and nowhere else. */
     private static List<Object> commands(Session session) {
         return List.of(
-                new CodesCommand(), new InspectCommand(session), new LimitCommand(), new SimulateCommand(session));
+                new ShortlistCommand(session),
+                new CodesCommand(),
+                new InspectCommand(session),
+                new SimulateCommand(session),
+                new LimitCommand());
     }
 
     /**
