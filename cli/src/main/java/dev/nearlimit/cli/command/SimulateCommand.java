@@ -36,8 +36,8 @@ import picocli.CommandLine.Spec;
             "  nearlimit simulate ldpc-802.11n:648,1/2 --decoder min-sum:scale=6/8",
             "            --modulation qpsk --ebn0 1:0.25:2.5",
             "  nearlimit simulate golay:23,12 --decoder syndrome --channel bsc:0.01",
-            "Every rate stands beside its 95 % interval. Counts depend on code, decoder, channel,",
-            "Eb/N0, seed and stopping rule alone: not on threads, machine or time."
+            "Every rate stands beside its 95 %% interval. Counts depend on code, decoder,",
+            "channel, Eb/N0, seed and stopping rule alone: not on threads, machine or time."
         })
 public final class SimulateCommand implements Callable<Integer> {
     private final Session session;

@@ -1,7 +1,9 @@
 package dev.nearlimit.cli.failure;
 
 import dev.nearlimit.cli.ExitCode;
+import java.util.Arrays;
 import java.util.List;
+import java.util.Locale;
 import java.util.stream.Collectors;
 import picocli.CommandLine.MaxValuesExceededException;
 import picocli.CommandLine.MissingParameterException;
@@ -9,6 +11,7 @@ import picocli.CommandLine.Model.ArgSpec;
 import picocli.CommandLine.Model.OptionSpec;
 import picocli.CommandLine.OverwrittenOptionException;
 import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.TypeConversionException;
 import picocli.CommandLine.UnmatchedArgumentException;
 
 /** Arguments that could not be parsed, in our words: one line, and the nearest known name where there is one. */
@@ -29,11 +32,18 @@ public final class ParseFailure {
             return unknown(unmatched, command);
         }
         if (e instanceof MissingParameterException missing) {
+            if (missing.getMissing().stream().anyMatch(arg -> isGivenWithoutValue(arg, missing))) {
+                return name(missing.getMissing().get(0)) + " needs a value";
+            }
             return command + " needs "
                     + missing.getMissing().stream().map(ParseFailure::name).collect(Collectors.joining(" and "));
         }
         if (e instanceof OverwrittenOptionException overwritten) {
             return name(overwritten.getOverwritten()) + " is given twice";
+        }
+        if (e.getCause() instanceof TypeConversionException && e.getArgSpec() != null) {
+            return name(e.getArgSpec()) + " is '" + e.getValue() + "', expected "
+                    + expected(e.getArgSpec().type());
         }
         if (e instanceof MaxValuesExceededException) {
             return "too many values: " + firstLower(e.getMessage());
@@ -49,6 +59,28 @@ public final class ParseFailure {
         List<String> near = e.getSuggestions();
         String hint = near.isEmpty() ? "" : "; did you mean " + near.get(0) + "?";
         return "unknown " + kind + " '" + argument + "'" + hint + " (see " + command + " --help)";
+    }
+
+    /** The parser reports an option that is absent and one that is left without its value in the same way. */
+    private static boolean isGivenWithoutValue(ArgSpec arg, MissingParameterException e) {
+        return arg instanceof OptionSpec option
+                && e.getCommandLine().getParseResult().originalArgs().contains(option.longestName());
+    }
+
+    private static String expected(Class<?> type) {
+        if (type.isEnum()) {
+            return "one of "
+                    + Arrays.stream(type.getEnumConstants())
+                            .map(constant -> ((Enum<?>) constant).name().toLowerCase(Locale.ROOT))
+                            .collect(Collectors.joining(", "));
+        }
+        if (type == int.class || type == Integer.class) {
+            return "a whole number up to " + Integer.MAX_VALUE;
+        }
+        if (type == long.class || type == Long.class) {
+            return "a whole number up to " + Long.MAX_VALUE;
+        }
+        return "a " + type.getSimpleName().toLowerCase(Locale.ROOT);
     }
 
     private static String name(ArgSpec arg) {

@@ -15,7 +15,7 @@ import picocli.CommandLine.ITypeConverter;
  */
 public record Fraction(double value, String text) {
     private static final Pattern QUOTIENT = Pattern.compile("(\\d{1,9})/(\\d{1,9})");
-    private static final Pattern DECIMAL = Pattern.compile("\\d{0,9}(\\.\\d{1,15})?(e-?\\d{1,3})?");
+    private static final Pattern DECIMAL = Pattern.compile("(\\d{1,9}(\\.\\d{1,15})?|\\.\\d{1,15})(e-?\\d{1,2})?");
 
     /** @throws InputException if the text is no such ratio */
     public static Fraction parse(String text) {
@@ -27,9 +27,7 @@ public record Fraction(double value, String text) {
             }
             return new Fraction(Double.parseDouble(quotient.group(1)) / below.doubleValue(), text);
         }
-        if (text.isEmpty()
-                || !Character.isDigit(text.charAt(text.length() - 1))
-                || !DECIMAL.matcher(text).matches()) {
+        if (!DECIMAL.matcher(text).matches()) {
             throw unusable(text);
         }
         return new Fraction(new BigDecimal(text).doubleValue(), text);

@@ -1,10 +1,11 @@
 package dev.nearlimit.cli.output;
 
 import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.PrettyPrinter;
 import com.fasterxml.jackson.core.StreamWriteFeature;
-import com.fasterxml.jackson.core.json.JsonWriteFeature;
 import com.fasterxml.jackson.core.util.DefaultIndenter;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
+import com.fasterxml.jackson.core.util.Separators;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectWriter;
 import com.fasterxml.jackson.databind.json.JsonMapper;
@@ -17,11 +18,12 @@ public final class JsonText {
     private static final ObjectWriter WRITER = JsonMapper.builder()
             // Before JDK 19 Double.toString does not always give the shortest digits.
             .enable(StreamWriteFeature.USE_FAST_DOUBLE_WRITER)
-            .enable(JsonWriteFeature.QUOTE_FIELD_NAMES)
             .build()
             .writer(new DefaultPrettyPrinter()
                     .withObjectIndenter(new DefaultIndenter("  ", "\n"))
-                    .withArrayIndenter(new DefaultIndenter("  ", "\n")));
+                    .withArrayIndenter(new DefaultIndenter("  ", "\n"))
+                    .withSeparators(
+                            PrettyPrinter.DEFAULT_SEPARATORS.withObjectFieldValueSpacing(Separators.Spacing.AFTER)));
 
     private JsonText() {}
 

@@ -1,0 +1,192 @@
+package dev.nearlimit.cli;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Arrays;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** Whatever a user gets wrong is answered by one line on standard error, exit code 2, and nothing else. */
+final class BadInputTest {
+    @TempDir
+    Path folder;
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            quoteCharacter = '"',
+            value = {
+                "inspect | nearlimit inspect needs CODE",
+                "inspect hamming:7,4 --matrix parity | --matrix goes with the path of a matrix file, but 'hamming:7,4' is none",
+                "inspect ./none.mtx --matrix parity | ./none.mtx: found no such file, expected a matrix file",
+                "inspect ./none.mtx | ./none.mtx: say what the matrix is: --matrix generator or --matrix parity is needed with a path",
+                "inspect hamming:7,4 --threads 0 | --threads is 0, must be 1 to 1024",
+                "inspect hamming:7,4 --matrix columns | --matrix is 'columns', expected one of generator, parity",
+                "codes --family turbo | unknown code family 'turbo'; known are repetition, parity-check, hamming, hamming-extended, golay, reed-muller, bch, bch-extended, ldpc-802.11n",
+                "codes --rate 3/4..1/2 | range '3/4..1/2' ends below its start",
+                "codes --rate high | 'high' is no ratio; expected a fraction such as 1/2 or a number such as 0.5",
+                "codes --length 10..5 | range '10..5' ends below its start",
+                "codes --length long | 'long' is no range of lengths; expected such as 100..700",
+                "codes --format xml | --format is 'xml', expected one of table, csv, json",
+                "codes extra | unknown argument 'extra' (see nearlimit codes --help)",
+                "codes --lenght 7 | unknown option '--lenght'; did you mean --length? (see nearlimit codes --help)",
+                "codez | unknown command 'codez'; did you mean codes? (see nearlimit --help)",
+                "limit | limit needs --rate, or --length and --information",
+                "limit --rate 1/2 --rate 1/3 | --rate is given twice",
+                "limit --rate | --rate needs a value",
+                "limit --rate 1/0 | '1/0' is no ratio; expected a fraction such as 1/2 or a number such as 0.5",
+                "limit --rate 1/2 --length 100 --information fifty --fer 0.1 | --information is 'fifty', expected a whole number up to 2147483647",
+                "limit --rate 1/2 --fer 0.1 | a finite-length limit needs length, information bits and FER together; the length is missing",
+                "limit --rate 1/2 --modulation am | unknown modulation 'am'; known are bpsk, qpsk",
+                "simulate hamming:7,4 --ebn0 1 | nearlimit simulate needs --decoder",
+                "simulate hamming:7,4 --decoder syndrome | channel awgn needs --ebn0",
+                "simulate hamming:7,4 --decoder syndrome --channel bsc:0.1 --ebn0 1 | channel bsc:0.1 has a fixed parameter and takes no --ebn0",
+                "simulate hamming:7,4 --decoder syndrome --channel bsc:0.7 | crossover probability is 0.7, must be between 0 and 0.5",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 loud | Eb/N0 is 'loud'; expected a number in dB with at most six decimals, a list 1,1.5,2 or a range 1:0.5:3",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 NaN | Eb/N0 is 'NaN'; expected a number in dB with at most six decimals, a list 1,1.5,2 or a range 1:0.5:3",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 1:2 | '1:2' is no range of Eb/N0; expected start:step:end, such as 1:0.5:3",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 3:1:2 | range '3:1:2' needs a step above 0 and an end not below its start",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 0:0.001:9 | '0:0.001:9' gives more than 1000 values of Eb/N0",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 200 | Eb/N0 is 200 dB; expected -100 to 100",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 1 --frames 0 | frames is 0, must be at least 1",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 1 --time-limit 5 | time limit is '5'; expected such as 90s, 5m or 2h",
+            })
+    void isRefusedInOneLine(String commandLine, String message) {
+        Execution execution = Execution.of(commandLine.split(" +"));
+        assertEquals("nearlimit: " + message + "\n", execution.err());
+        assertEquals(ExitCode.BAD_INPUT, execution.exitCode());
+        assertEquals("", execution.out());
+    }
+
+    /** Messages of other rooms are theirs to word; here it matters that they arrive as one line that names what is wrong. */
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            quoteCharacter = '"',
+            value = {
+                "inspect bhc:7,4 | unknown code family 'bhc'",
+                "inspect bch:7,9 | k is 9",
+                "simulate hamming:7,4 --decoder guess --ebn0 1 | unknown decoder 'guess'",
+                "simulate hamming:7,4 --decoder min-sum:colour=red --ebn0 1 | colour",
+                "simulate ldpc-802.11n:648,1/2 --decoder syndrome --ebn0 1 | syndrome",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 1 --channel wire | unknown channel 'wire'",
+                "limit --rate 1 | rate",
+                "limit --rate 1/2 --length 100 --information 50 --fer 0 | FER",
+                "limit --rate 1/2 --length 100 --information 50 --fer 1 | FER",
+                "limit --rate 1/2 --length 50 --information 100 --fer 0.1 | 100",
+                "limit --rate 1/2 --ber 0.7 | 0.7",
+            })
+    void ofOtherRoomsIsRefusedInOneLine(String commandLine, String part) {
+        Execution execution = Execution.of(commandLine.split(" +"));
+        assertTrue(execution.err().startsWith("nearlimit: "), execution.err());
+        assertTrue(execution.err().contains(part), execution.err());
+        assertEquals(1, execution.err().lines().count(), execution.err());
+        assertEquals(ExitCode.BAD_INPUT, execution.exitCode(), execution.err());
+        assertEquals("", execution.out());
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            quoteCharacter = '"',
+            value = {
+                "ragged.csv | parity | 1,0,1;0,1 | :2: found 2 entries, expected 3 as in line 1",
+                "digits.csv | parity | 1,2,0 | :1:3: found '2', expected 0 or 1, entries separated by commas or semicolons",
+                "empty.csv | generator | \"\" | : found an empty file, expected a matrix of 0 and 1",
+                "empty.mtx | generator | \"\" | : found an empty file, expected a matrix of 0 and 1",
+                "dependent.csv | generator | 1,0,1;1,0,1 | : the generator matrix of FILE has 2 rows but rank 1: its rows are dependent",
+                "zero.csv | parity | 1,0;0,1 | : the parity-check matrix of FILE has rank 2 = n, so that it admits only the zero word",
+            })
+    void matrixFileIsLocated(String name, String role, String content, String message) throws IOException {
+        Path file = write(name, content.replace(";", "\n"));
+        Execution execution = Execution.of("inspect", file.toString(), "--matrix", role);
+        String expected = "nearlimit: " + file + message.replace("FILE", file.toString()) + "\n";
+        assertEquals(expected, execution.err());
+        assertEquals(ExitCode.BAD_INPUT, execution.exitCode());
+        assertEquals("", execution.out());
+    }
+
+    /** The wording is the matrix reader's; the line at which the user has to look must be right. */
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            quoteCharacter = '"',
+            value = {
+                "%%MatrixMarket matrix cube pattern general;2 2 1;1 1 | 1",
+                "%%MatrixMarket matrix coordinate pattern general;2 3 2;1 1;3 1 | 4",
+                "%%MatrixMarket matrix coordinate pattern general;2 3 2;1 1;1 4 | 4",
+                "%%MatrixMarket matrix coordinate integer general;2 3 2;1 1 1;1 2 7 | 4",
+                "%%MatrixMarket matrix coordinate pattern general;2 3 2;1 1;1 1 | 4",
+            })
+    void matrixMarketErrorsNameTheirLine(String content, int line) throws IOException {
+        Path file = write("bad.mtx", content.replace(";", "\n"));
+        Execution execution = Execution.of("inspect", file.toString(), "--matrix", "parity", "--format", "json");
+        JsonNode error = new ObjectMapper().readTree(execution.err()).get("error");
+        assertEquals(file.toString(), error.get("file").asText());
+        assertEquals(line, error.get("line").asInt(), execution.err());
+        assertEquals(ExitCode.BAD_INPUT, execution.exitCode());
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"--format json", "--format=json", "--format JSON"})
+    void jsonIsAnsweredInJson(String format) throws IOException {
+        Path file = write("ragged.csv", "1,0\n1\n");
+        String[] args = Stream.concat(
+                        Stream.of("inspect", file.toString(), "--matrix", "parity"), Arrays.stream(format.split(" ")))
+                .toArray(String[]::new);
+        Execution execution = Execution.of(args);
+        JsonNode error = new ObjectMapper().readTree(execution.err()).get("error");
+        assertEquals(
+                "found 1 entry, expected 2 as in line 1", error.get("message").asText());
+        assertEquals(2, error.get("line").asInt());
+        assertTrue(error.get("column").isNull());
+        assertEquals(1, execution.err().lines().count());
+    }
+
+    @Test
+    void argumentsThatCannotBeParsedAreAnsweredInJsonToo() throws IOException {
+        Execution execution = Execution.of("limit", "--rat", "1/2", "--format", "json");
+        JsonNode error = new ObjectMapper().readTree(execution.err()).get("error");
+        assertTrue(error.get("message").asText().startsWith("unknown option '--rat'"), execution.err());
+        assertTrue(error.get("file").isNull());
+    }
+
+    @Test
+    void stackTraceIsPrintedOnlyOnRequest() {
+        assertFalse(Execution.of("limit", "--rate", "3").err().contains("\tat "));
+        assertTrue(Execution.of("limit", "--rate", "3", "--debug").err().contains("\tat dev.nearlimit"));
+    }
+
+    @Test
+    void controlCharactersAreSpelledOut() {
+        Execution execution = Execution.of("inspect", "bch:7,4\u001b[31m\nnext");
+        assertEquals(1, execution.err().lines().count(), execution.err());
+        assertFalse(execution.err().contains("\u001b"));
+    }
+
+    @Test
+    void failedCommandLeavesAnOlderResultAlone() throws IOException {
+        Path target = write("result.csv", "older");
+        Execution execution = Execution.of("limit", "--rate", "3", "--out", target.toString());
+        assertEquals(ExitCode.BAD_INPUT, execution.exitCode());
+        assertEquals("older", Files.readString(target));
+        try (Stream<Path> files = Files.list(folder)) {
+            assertEquals(1, files.count());
+        }
+    }
+
+    private Path write(String name, String content) throws IOException {
+        return Files.writeString(folder.resolve(name), content);
+    }
+}
