@@ -3,9 +3,11 @@ package dev.nearlimit.cli;
 import dev.nearlimit.cli.command.CodesCommand;
 import dev.nearlimit.cli.command.InspectCommand;
 import dev.nearlimit.cli.command.LimitCommand;
+import dev.nearlimit.cli.command.SimulateCommand;
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
 import dev.nearlimit.cli.failure.ParseFailure;
+import dev.nearlimit.cli.shortlist.ShortlistCommand;
 import java.io.PrintWriter;
 import java.util.List;
 import picocli.CommandLine;
@@ -47,7 +49,12 @@ public final class NearlimitCommand implements Runnable {
 
     /** All commands; a new one is added here and nowhere else. */
     private static List<Object> commands(Session session) {
-        return List.of(new CodesCommand(), new InspectCommand(session), new LimitCommand());
+        return List.of(
+                new ShortlistCommand(session),
+                new CodesCommand(),
+                new InspectCommand(session),
+                new SimulateCommand(session),
+                new LimitCommand());
     }
 
     /**

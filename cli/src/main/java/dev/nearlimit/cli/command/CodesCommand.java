@@ -6,6 +6,8 @@ import dev.nearlimit.cli.input.RateRange;
 import dev.nearlimit.cli.output.OutputOptions;
 import dev.nearlimit.codes.catalogue.Catalogue;
 import dev.nearlimit.codes.family.CodeFamily;
+import dev.nearlimit.decoders.DecoderFamily;
+import dev.nearlimit.decoders.catalogue.DecoderCatalogue;
 import java.util.List;
 import java.util.concurrent.Callable;
 import java.util.stream.Collectors;
@@ -17,7 +19,7 @@ import picocli.CommandLine.Option;
 /** {@code codes}: what the catalogue has. */
 @Command(
         name = "codes",
-        description = "Lists codes that can be named, with length, dimension, rate, distance and source.",
+        description = "Lists codes that can be named, with length, dimension, rate, distance, decoders and source.",
         footer = {
             "%nExamples:",
             "  nearlimit codes --rate 1/2",
@@ -55,7 +57,10 @@ public final class CodesCommand implements Callable<Integer> {
                 .filter(code -> rates == null || rates.contains(code.rateValue()))
                 .filter(code -> lengths == null || lengths.contains(code.n()))
                 .toList();
-        output.show(new CodesReport(codes));
+        List<String> decoders = DecoderCatalogue.standard().families().stream()
+                .map(DecoderFamily::name)
+                .toList();
+        output.show(new CodesReport(codes, decoders));
         return 0;
     }
 

@@ -12,13 +12,16 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 
 /**
  * The list of codes as a result to show.
  *
  * @param codes family by family
+ * @param decoders names of all decoders; the table refers to them by number
  */
-record CodesReport(List<ListedCode> codes) implements Presentation {
+record CodesReport(List<ListedCode> codes, List<String> decoders) implements Presentation {
     @Override
     public String table() {
         if (codes.isEmpty()) {
@@ -29,7 +32,8 @@ record CodesReport(List<ListedCode> codes) implements Presentation {
                 .numbers("n", "bit")
                 .numbers("k", "bit")
                 .numbers("rate")
-                .numbers("min. distance");
+                .numbers("min. distance")
+                .words("decoders");
         for (ListedCode code : codes) {
             table.row(
                     code.designator(),
@@ -38,11 +42,29 @@ record CodesReport(List<ListedCode> codes) implements Presentation {
                     Numbers.fixed(code.rateValue(), 4),
                     code.minimumDistance().isPresent()
                             ? String.valueOf(code.minimumDistance().getAsInt())
-                            : Numbers.UNKNOWN);
+                            : Numbers.UNKNOWN,
+                    marks(code));
         }
-        return table + "\n" + sources()
+        return table + "\n" + sources() + "\n" + legend()
                 + "\nOther members of a family are named the same way; a distance shown as - may be\n"
                 + "computed by nearlimit inspect CODE.\n";
+    }
+
+    /** The numbers of the decoders that fit, each in its own place. */
+    private String marks(ListedCode code) {
+        StringBuilder marks = new StringBuilder();
+        for (int d = 0; d < decoders.size(); d++) {
+            marks.append(code.decoders().contains(decoders.get(d)) ? String.valueOf(d + 1) : "-")
+                    .append(' ');
+        }
+        return marks.toString().stripTrailing();
+    }
+
+    private String legend() {
+        String names = IntStream.range(0, decoders.size())
+                .mapToObj(d -> (d + 1) + " " + decoders.get(d))
+                .collect(Collectors.joining(", "));
+        return String.join("\n", TextTable.wrap("decoders: " + names, TextTable.WIDTH)) + "\n";
     }
 
     /** Where each family comes from, once. */
@@ -59,7 +81,7 @@ record CodesReport(List<ListedCode> codes) implements Presentation {
 
     @Override
     public CsvText csv() {
-        CsvText csv = new CsvText("code", "n", "k", "rate", "minimumDistance", "source");
+        CsvText csv = new CsvText("code", "n", "k", "rate", "minimumDistance", "decoders", "source");
         for (ListedCode code : codes) {
             csv.record(
                     code.designator(),
@@ -67,6 +89,7 @@ record CodesReport(List<ListedCode> codes) implements Presentation {
                     code.k(),
                     code.rate(),
                     code.minimumDistance().isPresent() ? code.minimumDistance().getAsInt() : null,
+                    String.join(" ", code.decoders()),
                     code.source());
         }
         return csv;
@@ -83,6 +106,8 @@ record CodesReport(List<ListedCode> codes) implements Presentation {
             entry.put("k", code.k());
             entry.put("rate", code.rate());
             JsonText.put(entry, "minimumDistance", code.minimumDistance());
+            ArrayNode fitting = entry.putArray("decoders");
+            code.decoders().forEach(fitting::add);
             entry.put("source", code.source());
         }
         return root;

@@ -1,18 +1,22 @@
 package dev.nearlimit.cli.command;
 
 import dev.nearlimit.algebra.distance.DistanceReport;
+import dev.nearlimit.algebra.errorrate.UnionBound;
 import dev.nearlimit.algebra.graph.TannerGraph;
 import dev.nearlimit.algebra.weight.InfeasibleEnumerationException;
 import dev.nearlimit.algebra.weight.WeightEnumeration;
 import dev.nearlimit.cli.Session;
+import dev.nearlimit.cli.input.Ebn0List;
 import dev.nearlimit.cli.input.ThreadsOption;
 import dev.nearlimit.cli.output.OutputOptions;
 import dev.nearlimit.cli.progress.Progress;
 import dev.nearlimit.codes.Code;
+import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 
 /** {@code inspect}: the exact facts about one code. */
@@ -34,6 +38,14 @@ public final class InspectCommand implements Callable<Integer> {
     @Mixin
     private CodeArgument argument;
 
+    @Option(
+            names = "--ebn0",
+            paramLabel = "DB",
+            defaultValue = "2:1:8",
+            converter = Ebn0List.Converter.class,
+            description = "Eb/N0 in dB of the error bounds: a list or start:step:end (default: ${DEFAULT-VALUE}).")
+    private Ebn0List ebn0;
+
     @Mixin
     private ThreadsOption threads;
 
@@ -47,8 +59,13 @@ public final class InspectCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Code code = argument.code();
-        output.show(
-                new InspectReport(code, distances(code), whyNotEnumerated(code), TannerGraph.of(code.parityCheck())));
+        DistanceReport distances = distances(code);
+        List<MaximumLikelihoodBound> bounds = distances
+                .weights()
+                .map(weights -> MaximumLikelihoodBound.at(ebn0, UnionBound.of(weights)))
+                .orElse(List.of());
+        TannerGraph graph = TannerGraph.of(code.parityCheck());
+        output.show(new InspectReport(code, distances, whyNotEnumerated(code), bounds, graph));
         return 0;
     }
 

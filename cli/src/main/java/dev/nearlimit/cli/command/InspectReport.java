@@ -5,6 +5,7 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import dev.nearlimit.algebra.distance.DistanceBounds;
 import dev.nearlimit.algebra.distance.DistanceReport;
 import dev.nearlimit.algebra.distance.MinimumDistance;
+import dev.nearlimit.algebra.errorrate.ErrorRate;
 import dev.nearlimit.algebra.graph.TannerGraph;
 import dev.nearlimit.algebra.weight.WeightEnumerator;
 import dev.nearlimit.cli.output.CsvText;
@@ -14,6 +15,7 @@ import dev.nearlimit.cli.output.Presentation;
 import dev.nearlimit.cli.output.PropertyList;
 import dev.nearlimit.cli.output.TextTable;
 import dev.nearlimit.codes.Code;
+import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.OptionalInt;
@@ -30,21 +32,28 @@ final class InspectReport implements Presentation {
     private final Code code;
     private final DistanceReport distances;
     private final String whyNotEnumerated;
+    private final List<MaximumLikelihoodBound> bounds;
     private final TannerGraph graph;
     private final OptionalInt girth;
 
     /** @param whyNotEnumerated empty where there is a weight enumerator */
-    InspectReport(Code code, DistanceReport distances, String whyNotEnumerated, TannerGraph graph) {
+    InspectReport(
+            Code code,
+            DistanceReport distances,
+            String whyNotEnumerated,
+            List<MaximumLikelihoodBound> bounds,
+            TannerGraph graph) {
         this.code = code;
         this.distances = distances;
         this.whyNotEnumerated = whyNotEnumerated;
+        this.bounds = List.copyOf(bounds);
         this.graph = graph;
         this.girth = graph.girth();
     }
 
     @Override
     public String table() {
-        DistanceBounds bounds = distances.bounds();
+        DistanceBounds upper = distances.bounds();
         PropertyList facts = new PropertyList()
                 .add("code", code.designator())
                 .add("source", code.source())
@@ -54,8 +63,8 @@ final class InspectReport implements Presentation {
                 .add("minimum distance", distanceText())
                 .add(
                         "at most, any code",
-                        bounds.best() + " (Singleton " + bounds.singleton() + ", Hamming " + bounds.hamming()
-                                + ", Griesmer " + bounds.griesmer() + ")")
+                        upper.best() + " (Singleton " + upper.singleton() + ", Hamming " + upper.hamming()
+                                + ", Griesmer " + upper.griesmer() + ")")
                 .add(
                         "parity checks",
                         code.parityCheck().rows() + ", of which " + code.redundantChecks() + " depend on others")
@@ -70,7 +79,22 @@ final class InspectReport implements Presentation {
             facts.add("weights", "not counted: " + whyNotEnumerated);
             return facts.toString();
         }
-        return facts + "\n" + weightTable(distances.weights().get().weights());
+        return facts + "\n" + weightTable(distances.weights().get().weights()) + "\n" + boundTable();
+    }
+
+    private String boundTable() {
+        TextTable table =
+                new TextTable().numbers("Eb/N0", "dB").numbers("FER at most").numbers("BER at most");
+        for (MaximumLikelihoodBound bound : bounds) {
+            table.row(Numbers.trimmed(bound.ebn0Db()), atMost(bound.fer()), atMost(bound.ber()));
+        }
+        return "union bounds: soft maximum-likelihood decoding, bpsk or qpsk over awgn\n" + table
+                + "No decoder but maximum likelihood is promised to stay below them.\n";
+    }
+
+    /** A bound above 1 says nothing. */
+    private static String atMost(ErrorRate rate) {
+        return rate.value() >= 1 ? "1" : Numbers.errorRate(rate.value());
     }
 
     private String distanceText() {
@@ -126,6 +150,18 @@ final class InspectReport implements Presentation {
                 csv.record("wordsOfWeight", weight, known.weights().count(weight), "exact");
             }
         });
+        for (MaximumLikelihoodBound bound : bounds) {
+            csv.record(
+                    "unionBoundFer",
+                    bound.ebn0Db(),
+                    bound.fer().value(),
+                    bound.fer().basis().label());
+            csv.record(
+                    "unionBoundBer",
+                    bound.ebn0Db(),
+                    bound.ber().value(),
+                    bound.ber().basis().label());
+        }
         return csv;
     }
 
@@ -144,11 +180,22 @@ final class InspectReport implements Presentation {
         minimum.put("high", distance.high());
         minimum.put("status", status(distance));
         minimum.put("how", distance.how());
+        DistanceBounds best = distances.bounds();
         ObjectNode upper = root.putObject("distanceBounds");
-        upper.put("singleton", distances.bounds().singleton());
-        upper.put("hamming", distances.bounds().hamming());
-        upper.put("griesmer", distances.bounds().griesmer());
+        upper.put("singleton", best.singleton());
+        upper.put("hamming", best.hamming());
+        upper.put("griesmer", best.griesmer());
         putWeights(root);
+        ArrayNode list = root.putArray("bounds");
+        for (MaximumLikelihoodBound bound : bounds) {
+            ObjectNode entry = list.addObject();
+            JsonText.put(entry, "ebn0Db", bound.ebn0Db());
+            JsonText.put(entry, "fer", bound.fer().value());
+            entry.put("ferBasis", bound.fer().basis().label());
+            JsonText.put(entry, "ber", bound.ber().value());
+            entry.put("berBasis", bound.ber().basis().label());
+            entry.put("method", bound.fer().method());
+        }
         JsonText.put(root, "girth", girth);
         root.put("fourCycles", graph.fourCycles());
         root.put("edges", graph.edges());

@@ -2,6 +2,9 @@ package dev.nearlimit.cli.command;
 
 import dev.nearlimit.codes.Code;
 import dev.nearlimit.codes.KnownDistance;
+import dev.nearlimit.decoders.DecoderFamily;
+import dev.nearlimit.decoders.catalogue.DecoderCatalogue;
+import java.util.List;
 import java.util.OptionalInt;
 
 /**
@@ -9,14 +12,29 @@ import java.util.OptionalInt;
  *
  * @param family the family's name
  * @param minimumDistance where a theorem gives it
+ * @param decoders names of the decoders that fit it
  */
-record ListedCode(String designator, String family, int n, int k, OptionalInt minimumDistance, String source) {
+record ListedCode(
+        String designator,
+        String family,
+        int n,
+        int k,
+        OptionalInt minimumDistance,
+        String source,
+        List<String> decoders) {
+    ListedCode {
+        decoders = List.copyOf(decoders);
+    }
+
     static ListedCode of(String family, Code code) {
         OptionalInt distance = code.knownDistance()
                 .map(KnownDistance::value)
                 .map(OptionalInt::of)
                 .orElse(OptionalInt.empty());
-        return new ListedCode(code.designator(), family, code.n(), code.k(), distance, code.source());
+        List<String> decoders = DecoderCatalogue.standard().fitting(code).stream()
+                .map(DecoderFamily::name)
+                .toList();
+        return new ListedCode(code.designator(), family, code.n(), code.k(), distance, code.source(), decoders);
     }
 
     /** k/n, not reduced. */

@@ -6,6 +6,7 @@ import dev.nearlimit.codes.InvalidCodeException;
 import dev.nearlimit.codes.matrix.MatrixFormatException;
 import dev.nearlimit.decoders.InvalidDecoderException;
 import dev.nearlimit.limits.InvalidLimitException;
+import dev.nearlimit.shortlist.requirement.InvalidRequirementException;
 import dev.nearlimit.simulation.InvalidSimulationException;
 import java.util.List;
 import java.util.concurrent.CancellationException;
@@ -26,6 +27,7 @@ public record Failure(String message, String file, int line, int column, int exi
             InvalidCodeException.class,
             InvalidDecoderException.class,
             InvalidLimitException.class,
+            InvalidRequirementException.class,
             InvalidSimulationException.class);
 
     /** A failure of the tool or its surroundings. */

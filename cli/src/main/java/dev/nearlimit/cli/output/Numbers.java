@@ -35,6 +35,17 @@ public final class Numbers {
         return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
     }
 
+    /** At least two decimals and as many more as the number has, up to six: {@code 1.50}, {@code 1.125}. */
+    public static String trimmed(double value) {
+        String text = fixed(value, 6);
+        int end = text.length();
+        int least = text.indexOf('.') + 3;
+        while (end > least && text.charAt(end - 1) == '0') {
+            end--;
+        }
+        return text.substring(0, end);
+    }
+
     /** An error rate: two significant digits, {@code 1.2e-3}; 0 and 1 as they are. */
     public static String errorRate(double value) {
         if (!Double.isFinite(value)) {

@@ -38,6 +38,19 @@ public final class OutputFile {
         }
     }
 
+    /**
+     * Makes a folder and those above it, where they are not there yet.
+     *
+     * @throws InputException if it cannot be made
+     */
+    public static void makeFolder(Path folder) {
+        try {
+            Files.createDirectories(folder);
+        } catch (IOException e) {
+            throw new InputException("cannot make the folder: " + reason(e), folder.toString(), 0, 0);
+        }
+    }
+
     private static String reason(IOException e) {
         if (e instanceof NoSuchFileException || e instanceof NotDirectoryException) {
             return "the folder does not exist";

@@ -18,7 +18,7 @@ import java.util.Optional;
  *
  * @param bits information bits left out, at least 0
  */
-record Shortening(int bits) {
+public record Shortening(int bits) {
     static final String KEY = "+shorten=";
 
     /** Reads what follows the parameters of a designator: nothing, or {@code +shorten=s}. */
@@ -38,7 +38,7 @@ record Shortening(int bits) {
     }
 
     /** The shortened code; the code itself where nothing is left out. */
-    Code applyTo(Code mother) {
+    public Code applyTo(Code mother) {
         if (bits == 0) {
             return mother;
         }
@@ -56,7 +56,7 @@ record Shortening(int bits) {
         BitMatrix generator = mother.generator()
                 .selectRows(firstKept, firstKept + mother.k() - bits)
                 .selectColumns(columns);
-        Code shortened = Code.ofGenerator(mother.designator() + KEY + bits, mother.source() + "; shortened", generator)
+        Code shortened = Code.ofGenerator(designator(mother), mother.source() + "; shortened", generator)
                 .withParityCheck(selectColumns(mother.parityCheck(), columns));
         if (bch.isPresent()) {
             BchStructure whole = bch.get();
@@ -67,6 +67,16 @@ record Shortening(int bits) {
                 .flatMap(whole -> keptBlocks(whole, columns))
                 .map(shortened::withStructure)
                 .orElse(shortened);
+    }
+
+    /** A code that is shortened already is shortened by both counts together, which leaves out the same positions. */
+    private String designator(Code mother) {
+        String name = mother.designator();
+        int suffix = name.indexOf(KEY);
+        if (suffix < 0) {
+            return name + KEY + bits;
+        }
+        return name.substring(0, suffix) + KEY + (parse(name.substring(suffix)).bits() + bits);
     }
 
     /** Every position but those of the information bits left out, ascending. */

@@ -25,8 +25,8 @@ public final class CosetLeaders {
     public static final int MOST_SYNDROME_BITS = 22;
 
     private static final int MOST_POSITIONS = Character.MAX_VALUE;
-    /** Steps that take some seconds. */
-    private static final long MOST_STEPS = 1L << 32;
+    /** Steps that take about a second. */
+    private static final long MOST_STEPS = 1L << 28;
 
     private final SparseBitMatrix syndromeMatrix;
     private final int[] syndromeOfPosition;
@@ -52,7 +52,7 @@ public final class CosetLeaders {
         }
         if (code.n() > MOST_POSITIONS || ((long) code.n() << parity) > MOST_STEPS) {
             return Optional.of("finding its 2^" + parity + " coset leaders among " + code.n()
-                    + " positions takes too long; n * 2^(n-k) may be at most 2^32 and n " + MOST_POSITIONS);
+                    + " positions takes too long; n * 2^(n-k) may be at most 2^28 and n " + MOST_POSITIONS);
         }
         return Optional.empty();
     }

@@ -43,7 +43,7 @@ final class SchemeBench {
     }
 
     /** Frames in a block by default: a function of the scheme alone, so that a later run finds the same blocks. */
-    private static int defaultFramesPerBlock(Scheme scheme) {
+    static int defaultFramesPerBlock(Scheme scheme) {
         double decoding = scheme.decoder()
                 .operationsPerFrame(scheme.code(), scheme.decoder().maxIterations())
                 .total();

@@ -14,11 +14,14 @@ abstract class BeliefPropagation implements Decoder {
     private final int n;
     private final Iterations iterations;
     private final FrameStops stops;
+    private final FrameStops.HardDecisions decisions;
 
     BeliefPropagation(SparseBitMatrix matrix, Iterations iterations) {
         this.n = matrix.columns();
         this.iterations = iterations;
         this.stops = new FrameStops(matrix);
+        // Made once: a batch allocates nothing.
+        this.decisions = this::hardDecisions;
     }
 
     @Override
@@ -30,17 +33,17 @@ abstract class BeliefPropagation implements Decoder {
         load(received);
         stops.start();
         if (iterations.earlyStop()) {
-            stops.stopSatisfied(this::hardDecisions, 0, decoded);
+            stops.stopSatisfied(decisions, 0, decoded);
         }
         int taken = 0;
         while (taken < iterations.most() && !stops.allStopped()) {
             iterate();
             taken++;
             if (iterations.earlyStop() && taken < iterations.most()) {
-                stops.stopSatisfied(this::hardDecisions, taken, decoded);
+                stops.stopSatisfied(decisions, taken, decoded);
             }
         }
-        stops.stopAll(this::hardDecisions, taken, decoded);
+        stops.stopAll(decisions, taken, decoded);
     }
 
     /** Starts a batch: posteriors are the channel's values, messages are 0. */

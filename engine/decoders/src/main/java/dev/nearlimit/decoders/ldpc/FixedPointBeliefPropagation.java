@@ -25,10 +25,11 @@ final class FixedPointBeliefPropagation extends BeliefPropagation {
     private final FixedPointCheckRule rule;
     private final int largestPosterior;
     private final int[] posterior;
-    private final int[] message;
+    private final int[][] message;
     private final int[] channel;
     private final int[] sum;
-    private final int[] incoming;
+    private final int[][] incoming;
+    private final int[] touched;
 
     FixedPointBeliefPropagation(
             SparseBitMatrix matrix, Iterations iterations, WordLengths words, MagnitudeCorrection correction) {
@@ -39,10 +40,16 @@ final class FixedPointBeliefPropagation extends BeliefPropagation {
         this.rule = new FixedPointCheckRule(words.largestMessage(), correction, lanes);
         this.largestPosterior = words.largestPosterior();
         this.posterior = new int[matrix.columns() * FrameBatch.FRAMES];
-        this.message = new int[Math.multiplyExact(matrix.ones(), FrameBatch.FRAMES)];
+        this.message = new int[runs.edges()][];
+        for (int run = 0; run < runs.count(); run++) {
+            for (int i = 0; i < runs.degree(run); i++) {
+                message[runs.firstEdge(run) + i] = new int[runs.rows(run) * FrameBatch.FRAMES];
+            }
+        }
         this.channel = new int[layered ? 0 : posterior.length];
         this.sum = new int[layered ? 0 : posterior.length];
-        this.incoming = new int[runs.largestDegree() * lanes];
+        this.incoming = new int[runs.largestDegree()][lanes];
+        this.touched = new int[lanes];
     }
 
     @Override
@@ -52,33 +59,37 @@ final class FixedPointBeliefPropagation extends BeliefPropagation {
             posterior[i] = levels[i];
         }
         System.arraycopy(posterior, 0, channel, 0, channel.length);
-        Arrays.fill(message, 0);
+        for (int[] ofEdge : message) {
+            Arrays.fill(ofEdge, 0);
+        }
     }
 
     @Override
     void iterate() {
         System.arraycopy(channel, 0, sum, 0, sum.length);
-        int messagesOfRun = 0;
         for (int run = 0; run < runs.count(); run++) {
             int lanes = runs.rows(run) * FrameBatch.FRAMES;
             int degree = runs.degree(run);
+            int first = runs.firstEdge(run);
             for (int i = 0; i < degree; i++) {
-                int bits = runs.column(run, i) * FrameBatch.FRAMES;
-                subtract(posterior, bits, message, messagesOfRun + i * lanes, incoming, i * lanes, lanes);
+                System.arraycopy(posterior, runs.column(run, i) * FrameBatch.FRAMES, incoming[i], 0, lanes);
+                subtract(incoming[i], message[first + i], lanes);
             }
-            rule.apply(incoming, degree, lanes, message, messagesOfRun);
+            rule.apply(incoming, degree, lanes, message, first);
             for (int i = 0; i < degree; i++) {
                 int bits = runs.column(run, i) * FrameBatch.FRAMES;
                 if (layered) {
-                    addLimited(incoming, i * lanes, message, messagesOfRun + i * lanes, posterior, bits, lanes);
+                    addLimited(incoming[i], message[first + i], largestPosterior, lanes);
+                    System.arraycopy(incoming[i], 0, posterior, bits, lanes);
                 } else {
-                    accumulate(message, messagesOfRun + i * lanes, sum, bits, lanes);
+                    System.arraycopy(sum, bits, touched, 0, lanes);
+                    add(touched, message[first + i], lanes);
+                    System.arraycopy(touched, 0, sum, bits, lanes);
                 }
             }
-            messagesOfRun += degree * lanes;
         }
         if (!layered) {
-            limit(sum, posterior);
+            limit(sum, posterior, largestPosterior);
         }
     }
 
@@ -92,27 +103,25 @@ final class FixedPointBeliefPropagation extends BeliefPropagation {
         return word;
     }
 
-    private static void subtract(int[] a, int aFrom, int[] b, int bFrom, int[] result, int from, int lanes) {
+    private static void subtract(int[] values, int[] less, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            result[from + f] = a[aFrom + f] - b[bFrom + f];
+            values[f] -= less[f];
         }
     }
 
-    private static void accumulate(int[] a, int aFrom, int[] total, int from, int lanes) {
+    private static void add(int[] values, int[] more, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            total[from + f] += a[aFrom + f];
+            values[f] += more[f];
         }
     }
 
-    private void addLimited(int[] a, int aFrom, int[] b, int bFrom, int[] result, int from, int lanes) {
-        int limit = largestPosterior;
+    private static void addLimited(int[] values, int[] more, int limit, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            result[from + f] = limited(a[aFrom + f] + b[bFrom + f], limit);
+            values[f] = limited(values[f] + more[f], limit);
         }
     }
 
-    private void limit(int[] values, int[] result) {
-        int limit = largestPosterior;
+    private static void limit(int[] values, int[] result, int limit) {
         for (int i = 0; i < result.length; i++) {
             result[i] = limited(values[i], limit);
         }

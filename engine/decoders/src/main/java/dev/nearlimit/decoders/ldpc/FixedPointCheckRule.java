@@ -14,6 +14,7 @@ final class FixedPointCheckRule {
     private final int[] least;
     private final int[] second;
     private final int[] sign;
+    private final int[] gain;
 
     FixedPointCheckRule(int largestMessage, MagnitudeCorrection correction, int lanes) {
         this.largestMessage = largestMessage;
@@ -22,32 +23,32 @@ final class FixedPointCheckRule {
         this.least = new int[lanes];
         this.second = new int[lanes];
         this.sign = new int[lanes];
+        this.gain = new int[lanes];
     }
 
     /**
      * Computes the messages of {@code lanes} rows of the same degree.
      *
-     * @param incoming what the checks read: lane f of edge i at {@code i * lanes + f}
-     * @param message receives the outgoing messages in the same order from {@code from} on
+     * @param incoming what the checks read: lane f of edge i at {@code [i][f]}
+     * @param message receives the outgoing messages: lane f of edge i at {@code [first + i][f]}
      */
-    void apply(int[] incoming, int degree, int lanes, int[] message, int from) {
+    void apply(int[][] incoming, int degree, int lanes, int[][] message, int first) {
         // Starting both minima at the largest message limits every magnitude to it at no cost.
         Arrays.fill(least, 0, lanes, largestMessage);
         Arrays.fill(second, 0, lanes, largestMessage);
         Arrays.fill(sign, 0, lanes, 0);
         for (int i = 0; i < degree; i++) {
-            takeMinima(incoming, i * lanes, least, second, sign, lanes);
+            takeMinima(incoming[i], least, second, sign, lanes);
         }
-        // Only the corrected values are sent, but edges are told apart by the least magnitude as it was.
-        correct(second, lanes);
+        correct(least, second, gain, eighths, offset, lanes);
         for (int i = 0; i < degree; i++) {
-            send(incoming, i * lanes, message, from + i * lanes, lanes);
+            send(incoming[i], least, second, gain, sign, message[first + i], lanes);
         }
     }
 
-    private static void takeMinima(int[] incoming, int from, int[] least, int[] second, int[] sign, int lanes) {
+    private static void takeMinima(int[] incoming, int[] least, int[] second, int[] sign, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            int t = incoming[from + f];
+            int t = incoming[f];
             int magnitude = Math.abs(t);
             int best = least[f];
             int below = magnitude - best;
@@ -55,33 +56,35 @@ final class FixedPointCheckRule {
             least[f] = best + lowered;
             int larger = magnitude - lowered;
             int next = second[f];
-            int gain = larger - next;
-            second[f] = next + (gain & (gain >> 31));
+            int fall = larger - next;
+            second[f] = next + (fall & (fall >> 31));
             sign[f] ^= t;
         }
     }
 
-    private void correct(int[] magnitude, int lanes) {
+    /**
+     * Corrects what is sent, and keeps it as the message made of the second magnitude and what to add to it for that made
+     * of the least; the least stays as it was, since edges are told apart by it.
+     */
+    private static void correct(int[] least, int[] second, int[] gain, int eighths, int offset, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            magnitude[f] = corrected(magnitude[f]);
+            int scaled = ((eighths * second[f]) >> 3) - offset;
+            int others = scaled & ~(scaled >> 31);
+            scaled = ((eighths * least[f]) >> 3) - offset;
+            second[f] = others;
+            gain[f] = (scaled & ~(scaled >> 31)) - others;
         }
     }
 
-    private int corrected(int magnitude) {
-        int m = ((eighths * magnitude) >> 3) - offset;
-        return m & ~(m >> 31);
-    }
-
-    private void send(int[] incoming, int from, int[] message, int to, int lanes) {
+    private static void send(
+            int[] incoming, int[] least, int[] second, int[] gain, int[] sign, int[] message, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            int t = incoming[from + f];
-            int best = least[f];
-            int others = second[f];
+            int t = incoming[f];
             // All ones where another edge had the least magnitude; where two share it, both choices are equal.
-            int another = (best - Math.abs(t)) >> 31;
-            int m = others + ((corrected(best) - others) & another);
+            int another = (least[f] - Math.abs(t)) >> 31;
+            int m = second[f] + (gain[f] & another);
             int negative = (sign[f] ^ t) >> 31;
-            message[to + f] = (m ^ negative) - negative;
+            message[f] = (m ^ negative) - negative;
         }
     }
 }

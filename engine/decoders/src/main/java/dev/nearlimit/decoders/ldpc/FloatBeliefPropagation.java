@@ -27,8 +27,9 @@ final class FloatBeliefPropagation extends BeliefPropagation {
     private final boolean layered;
     private final FloatCheckRule rule;
     private final float[] channel;
-    private final float[] message;
-    private final float[] incoming;
+    private final float[][] message;
+    private final float[][] incoming;
+    private final float[] touched = new float[RowRuns.MOST_ROWS * FrameBatch.FRAMES];
     private float[] posterior;
     private float[] sum;
 
@@ -38,10 +39,15 @@ final class FloatBeliefPropagation extends BeliefPropagation {
         this.layered = iterations.schedule() == Schedule.LAYERED;
         this.rule = rule;
         this.posterior = new float[matrix.columns() * FrameBatch.FRAMES];
-        this.message = new float[Math.multiplyExact(matrix.ones(), FrameBatch.FRAMES)];
+        this.message = new float[runs.edges()][];
+        for (int run = 0; run < runs.count(); run++) {
+            for (int i = 0; i < runs.degree(run); i++) {
+                message[runs.firstEdge(run) + i] = new float[runs.rows(run) * FrameBatch.FRAMES];
+            }
+        }
         this.channel = new float[layered ? 0 : posterior.length];
         this.sum = new float[layered ? 0 : posterior.length];
-        this.incoming = new float[runs.largestDegree() * RowRuns.MOST_ROWS * FrameBatch.FRAMES];
+        this.incoming = new float[runs.largestDegree()][touched.length];
     }
 
     @Override
@@ -52,31 +58,35 @@ final class FloatBeliefPropagation extends BeliefPropagation {
             posterior[i] = Math.max(-LARGEST, Math.min(LARGEST, values[i])) + 0f;
         }
         System.arraycopy(posterior, 0, channel, 0, channel.length);
-        Arrays.fill(message, 0f);
+        for (float[] ofEdge : message) {
+            Arrays.fill(ofEdge, 0f);
+        }
     }
 
     @Override
     void iterate() {
         System.arraycopy(channel, 0, sum, 0, sum.length);
-        int messagesOfRun = 0;
         for (int run = 0; run < runs.count(); run++) {
             int lanes = runs.rows(run) * FrameBatch.FRAMES;
             int degree = runs.degree(run);
+            int first = runs.firstEdge(run);
             for (int i = 0; i < degree; i++) {
-                int bits = runs.column(run, i) * FrameBatch.FRAMES;
-                subtract(posterior, bits, message, messagesOfRun + i * lanes, incoming, i * lanes, lanes);
+                System.arraycopy(posterior, runs.column(run, i) * FrameBatch.FRAMES, incoming[i], 0, lanes);
+                subtract(incoming[i], message[first + i], lanes);
             }
-            rule.apply(incoming, degree, lanes, message, messagesOfRun);
-            limit(message, messagesOfRun, degree * lanes);
+            rule.apply(incoming, degree, lanes, message, first);
             for (int i = 0; i < degree; i++) {
+                limit(message[first + i], lanes);
                 int bits = runs.column(run, i) * FrameBatch.FRAMES;
                 if (layered) {
-                    add(incoming, i * lanes, message, messagesOfRun + i * lanes, posterior, bits, lanes);
+                    add(incoming[i], message[first + i], lanes);
+                    System.arraycopy(incoming[i], 0, posterior, bits, lanes);
                 } else {
-                    add(sum, bits, message, messagesOfRun + i * lanes, sum, bits, lanes);
+                    System.arraycopy(sum, bits, touched, 0, lanes);
+                    add(touched, message[first + i], lanes);
+                    System.arraycopy(touched, 0, sum, bits, lanes);
                 }
             }
-            messagesOfRun += degree * lanes;
         }
         if (!layered) {
             float[] old = posterior;
@@ -95,21 +105,21 @@ final class FloatBeliefPropagation extends BeliefPropagation {
         return word;
     }
 
-    private static void subtract(float[] a, int aFrom, float[] b, int bFrom, float[] result, int from, int lanes) {
+    private static void subtract(float[] values, float[] less, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            result[from + f] = a[aFrom + f] - b[bFrom + f];
+            values[f] -= less[f];
         }
     }
 
-    private static void add(float[] a, int aFrom, float[] b, int bFrom, float[] result, int from, int lanes) {
+    private static void add(float[] values, float[] more, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            result[from + f] = a[aFrom + f] + b[bFrom + f];
+            values[f] += more[f];
         }
     }
 
-    private static void limit(float[] values, int from, int count) {
-        for (int f = 0; f < count; f++) {
-            values[from + f] = Math.max(-LARGEST, Math.min(LARGEST, values[from + f]));
+    private static void limit(float[] values, int lanes) {
+        for (int f = 0; f < lanes; f++) {
+            values[f] = Math.max(-LARGEST, Math.min(LARGEST, values[f]));
         }
     }
 }

@@ -5,8 +5,8 @@ interface FloatCheckRule {
     /**
      * Computes the messages of {@code lanes} rows of the same degree.
      *
-     * @param incoming what the checks read: lane f of edge i at {@code i * lanes + f}
-     * @param message receives the outgoing messages in the same order from {@code from} on
+     * @param incoming what the checks read: lane f of edge i at {@code [i][f]}
+     * @param message receives the outgoing messages: lane f of edge i at {@code [first + i][f]}
      */
-    void apply(float[] incoming, int degree, int lanes, float[] message, int from);
+    void apply(float[][] incoming, int degree, int lanes, float[][] message, int first);
 }

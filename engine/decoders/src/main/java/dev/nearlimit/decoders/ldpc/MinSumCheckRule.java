@@ -15,9 +15,9 @@ final class MinSumCheckRule extends PairwiseCheckRule {
     }
 
     @Override
-    void combine(float[] a, int aFrom, float[] b, int bFrom, float[] result, int from, int lanes) {
+    void combine(float[] a, float[] b, float[] result, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            result[from + f] = lesser(a[aFrom + f], b[bFrom + f]);
+            result[f] = lesser(a[f], b[f]);
         }
     }
 
@@ -27,16 +27,24 @@ final class MinSumCheckRule extends PairwiseCheckRule {
     }
 
     @Override
-    void finish(float[] message, int from, int count) {
+    void finish(float[] message, int lanes) {
         if (offset > 0f) {
-            for (int f = 0; f < count; f++) {
-                float m = message[from + f];
-                message[from + f] = m - Math.max(-offset, Math.min(offset, m));
-            }
+            subtractOffset(message, offset, lanes);
         } else if (factor != 1f) {
-            for (int f = 0; f < count; f++) {
-                message[from + f] *= factor;
-            }
+            multiply(message, factor, lanes);
+        }
+    }
+
+    private static void subtractOffset(float[] message, float offset, int lanes) {
+        for (int f = 0; f < lanes; f++) {
+            float m = message[f];
+            message[f] = m - Math.max(-offset, Math.min(offset, m));
+        }
+    }
+
+    private static void multiply(float[] message, float factor, int lanes) {
+        for (int f = 0; f < lanes; f++) {
+            message[f] *= factor;
         }
     }
 }

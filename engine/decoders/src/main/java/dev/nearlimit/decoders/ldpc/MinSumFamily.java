@@ -11,7 +11,14 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
-/** {@code min-sum}: in fixed point when a quantiser is chosen with {@code word=}, in single precision otherwise. */
+/**
+ * {@code min-sum}: in fixed point when a quantiser is chosen with {@code word=}, in single precision otherwise.
+ *
+ * <p>A factor suits codes of even row weight and long words. In fixed point floor(6m/8) takes a whole level off each small
+ * message, which costs the more the wider the step; an offset near 0.5 LLR units does better there and on irregular
+ * codes. Measured on 802.11n (1944,972) at 1.75 dB, 20 layered iterations, 1536 frames: FER 0.018 in single precision
+ * with scale=6/8; 0.098 with word=6, 0.25 with word=5, 0.93 with word=4; 0.0007 with word=5,offset=1, as sum-product.
+ */
 public final class MinSumFamily implements DecoderFamily {
     /** Common practice for normalised min-sum on codes with row weights of 6 to 8. */
     private static final MagnitudeCorrection STANDARD = new MagnitudeCorrection.Scale(6);

@@ -15,39 +15,41 @@ import java.util.Arrays;
  * A row of weight 1 sends the largest message.
  */
 abstract class PairwiseCheckRule implements FloatCheckRule {
-    private final float[] forward;
+    private final float[][] forward;
     private final float[] backward;
 
     PairwiseCheckRule(int largestDegree, int lanes) {
-        this.forward = new float[largestDegree * lanes];
+        this.forward = new float[largestDegree][lanes];
         this.backward = new float[lanes];
     }
 
     @Override
-    public final void apply(float[] incoming, int degree, int lanes, float[] message, int from) {
+    public final void apply(float[][] incoming, int degree, int lanes, float[][] message, int first) {
         if (degree == 1) {
-            Arrays.fill(message, from, from + lanes, FloatBeliefPropagation.LARGEST);
-            finish(message, from, lanes);
+            Arrays.fill(message[first], 0, lanes, FloatBeliefPropagation.LARGEST);
+            finish(message[first], lanes);
             return;
         }
-        System.arraycopy(incoming, 0, forward, 0, lanes);
+        System.arraycopy(incoming[0], 0, forward[0], 0, lanes);
         for (int i = 1; i <= degree - 2; i++) {
-            combine(forward, (i - 1) * lanes, incoming, i * lanes, forward, i * lanes, lanes);
+            combine(forward[i - 1], incoming[i], forward[i], lanes);
         }
         int last = degree - 1;
-        System.arraycopy(forward, (last - 1) * lanes, message, from + last * lanes, lanes);
-        System.arraycopy(incoming, last * lanes, backward, 0, lanes);
-        for (int i = degree - 2; i >= 1; i--) {
-            combine(forward, (i - 1) * lanes, backward, 0, message, from + i * lanes, lanes);
-            combine(backward, 0, incoming, i * lanes, backward, 0, lanes);
+        System.arraycopy(forward[last - 1], 0, message[first + last], 0, lanes);
+        System.arraycopy(incoming[last], 0, backward, 0, lanes);
+        for (int i = last - 1; i >= 1; i--) {
+            combine(forward[i - 1], backward, message[first + i], lanes);
+            combine(backward, incoming[i], backward, lanes);
         }
-        System.arraycopy(backward, 0, message, from, lanes);
-        finish(message, from, degree * lanes);
+        System.arraycopy(backward, 0, message[first], 0, lanes);
+        for (int i = 0; i < degree; i++) {
+            finish(message[first + i], lanes);
+        }
     }
 
-    /** The operation on {@code lanes} pairs; the result may lie where the first operands lie. */
-    abstract void combine(float[] a, int aFrom, float[] b, int bFrom, float[] result, int from, int lanes);
+    /** The operation on {@code lanes} pairs; the result may be the array of the first operands. */
+    abstract void combine(float[] a, float[] b, float[] result, int lanes);
 
     /** What is done to every message at the end. */
-    abstract void finish(float[] message, int from, int count);
+    abstract void finish(float[] message, int lanes);
 }

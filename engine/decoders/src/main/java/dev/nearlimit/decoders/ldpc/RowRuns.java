@@ -1,6 +1,7 @@
 package dev.nearlimit.decoders.ldpc;
 
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
+import java.util.Arrays;
 
 /**
  * The rows of a parity-check matrix gathered into runs that may be done together: within a run every row is the row
@@ -8,8 +9,11 @@ import dev.nearlimit.codes.gf2.SparseBitMatrix;
  * side by side in position-major arrays and the rows do not see each other's results. Quasi-cyclic matrices have long
  * runs; any other matrix has runs of one row. The order of rows and of edges is that of the matrix.
  *
- * <p>Rows without ones are left out: they are always satisfied. Messages of a run are kept edge by edge: i-th edges of
- * all its rows, then the next.
+ * <p>Rows without ones are left out: they are always satisfied.
+ *
+ * <p>Decoders keep one array of soft values for each edge of a run, its rows side by side, and copy the posteriors that
+ * an edge touches to and from such an array: the JIT of Java 17 and 25 makes SIMD of a loop only where it reads and writes
+ * every array at the same index, not where each has an offset of its own.
  */
 final class RowRuns {
     /** Rows in a run at most: their soft values of one edge then fill 2 KB, so that a run's work stays in the L1 cache. */
@@ -51,7 +55,7 @@ final class RowRuns {
         rows = rowsOfRun;
         degree = degreeOfRun;
         firstEdge = new int[runs];
-        int[] columns = new int[matrix.ones()];
+        int[] columns = new int[Arrays.stream(degreeOfRun).sum()];
         int edges = 0;
         for (int run = 0; run < runs; run++) {
             firstEdge[run] = edges;
@@ -88,6 +92,16 @@ final class RowRuns {
     /** Ones of each row of a run. */
     int degree(int run) {
         return degree[run];
+    }
+
+    /** Number of a run's first edge, counting the edges of all runs one after the other. */
+    int firstEdge(int run) {
+        return firstEdge[run];
+    }
+
+    /** Edges of all runs. */
+    int edges() {
+        return column.length;
     }
 
     /** Column of the i-th one of a run's first row. */

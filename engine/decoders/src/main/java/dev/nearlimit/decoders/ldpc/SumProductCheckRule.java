@@ -22,25 +22,29 @@ final class SumProductCheckRule extends PairwiseCheckRule {
     }
 
     @Override
-    void combine(float[] a, int aFrom, float[] b, int bFrom, float[] result, int from, int lanes) {
-        // Three short passes, since the JIT does not unroll, and so makes no SIMD of, one long loop body.
-        distances(a, aFrom, b, bFrom, lanes);
-        BoxPlusCorrection.replace(ofSum, 0, lanes);
-        BoxPlusCorrection.replace(ofDifference, 0, lanes);
+    void combine(float[] a, float[] b, float[] result, int lanes) {
+        // Short passes, since the JIT does not unroll, and so makes no SIMD of, one long loop body.
+        distances(a, b, ofSum, ofDifference, lanes);
+        BoxPlusCorrection.replace(ofSum, lanes);
+        BoxPlusCorrection.replace(ofDifference, lanes);
+        correct(a, b, ofSum, ofDifference, result, lanes);
+    }
+
+    private static void distances(float[] a, float[] b, float[] ofSum, float[] ofDifference, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            result[from + f] = MinSumCheckRule.lesser(a[aFrom + f], b[bFrom + f]) + (ofSum[f] - ofDifference[f]);
+            ofSum[f] = Math.abs(a[f] + b[f]);
+            ofDifference[f] = Math.abs(a[f] - b[f]);
         }
     }
 
-    private void distances(float[] a, int aFrom, float[] b, int bFrom, int lanes) {
+    private static void correct(float[] a, float[] b, float[] ofSum, float[] ofDifference, float[] result, int lanes) {
         for (int f = 0; f < lanes; f++) {
-            ofSum[f] = Math.abs(a[aFrom + f] + b[bFrom + f]);
-            ofDifference[f] = Math.abs(a[aFrom + f] - b[bFrom + f]);
+            result[f] = MinSumCheckRule.lesser(a[f], b[f]) + (ofSum[f] - ofDifference[f]);
         }
     }
 
     @Override
-    void finish(float[] message, int from, int count) {
+    void finish(float[] message, int lanes) {
         // Nothing to correct.
     }
 }

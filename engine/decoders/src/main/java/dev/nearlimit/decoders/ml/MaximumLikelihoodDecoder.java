@@ -18,7 +18,7 @@ import java.util.Arrays;
  * {@value #GROUP}; for each group and each of its patterns the sum of the LLRs at the pattern's ones is tabulated,
  * added in ascending order of position in single precision; a word's loss is the sum of its groups' entries in ascending
  * order of group. So a loss depends on the word alone and no error builds up along the walk. The first word of least
- * loss in the order of w wins.
+ * loss in the order of w wins. LLRs must be finite.
  */
 final class MaximumLikelihoodDecoder implements Decoder {
     /** Positions whose sums are tabulated together. */

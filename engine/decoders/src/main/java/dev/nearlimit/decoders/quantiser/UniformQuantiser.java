@@ -36,10 +36,10 @@ public record UniformQuantiser(int wordBits, float step, Rise rise) implements Q
     }
 
     /**
-     * The step that holds when the user gives none: 16 / 2^b, so that the levels span LLRs of -8 .. 8. Near the waterfall
-     * of codes of rates 1/2 to 5/6 with BPSK or QPSK the LLRs have a mean of 2 to 8 and a variance of twice the mean, so
-     * that the finest loss comes from a span of about one mean plus one deviation: wider wastes levels, narrower clips
-     * what the decoder needs. A scheme for other modulations should state its own step.
+     * The step that holds when the user gives none: 16 / 2^b, so that the levels span LLRs of about -8 .. 8. Near the
+     * waterfall of codes of rates 1/2 to 5/6 with BPSK or QPSK the LLRs have a mean of 2 to 8 and a variance of twice
+     * the mean: a much wider span wastes levels on values that decide alike, a much narrower one clips those that tell
+     * sure bits from doubtful ones. A scheme far from that should state its own step.
      */
     public static float standardStep(int wordBits) {
         return 16f / (1 << wordBits);

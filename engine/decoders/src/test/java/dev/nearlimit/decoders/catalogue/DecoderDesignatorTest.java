@@ -5,20 +5,24 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.sun.management.ThreadMXBean;
 import dev.nearlimit.codes.Code;
 import dev.nearlimit.codes.catalogue.Catalogue;
 import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.decoders.DecoderFamily;
 import dev.nearlimit.decoders.DecoderSettings;
 import dev.nearlimit.decoders.InvalidDecoderException;
+import dev.nearlimit.decoders.RandomBatches;
 import dev.nearlimit.decoders.batch.DecodedBatch;
 import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.decoders.ldpc.Iterations;
 import dev.nearlimit.decoders.ldpc.MagnitudeCorrection;
 import dev.nearlimit.decoders.ldpc.MinSumSettings;
 import dev.nearlimit.decoders.quantiser.NoQuantiser;
+import java.lang.management.ManagementFactory;
 import java.util.Arrays;
 import java.util.Optional;
+import java.util.Random;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -187,5 +191,36 @@ class DecoderDesignatorTest {
         assertEquals(2 * 36, sumProduct.operationsPerFrame(code, 2).lookups());
         DecoderSettings syndrome = DecoderDesignator.parse("syndrome").decoder();
         assertEquals(9 + 7, syndrome.operationsPerFrame(code, 0).additions());
+    }
+
+    /** What a call allocates is measured by the JVM itself; 100 calls may not add up to one object a call. */
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "hamming:15,11 | syndrome",
+                "hamming:15,11 | bounded-distance",
+                "bch:15,5 | bounded-distance",
+                "bch:15,5 | maximum-likelihood",
+                "hamming:15,11 | sum-product:schedule=flooding",
+                "hamming:15,11 | sum-product",
+                "hamming:15,11 | min-sum:word=5",
+                "hamming:15,11 | min-sum:offset=1"
+            })
+    void aCallAllocatesNothing(String designator, String decoderDesignator) {
+        Code code = Catalogue.standard().build(designator);
+        DecoderChoice choice = DecoderDesignator.parse(decoderDesignator);
+        Decoder decoder = choice.decoder().newDecoder(code, choice.quantiser());
+        LlrBatch received = RandomBatches.noisy(code, new Random(1), 0.8, new long[code.n()]);
+        choice.quantiser().apply(received);
+        DecodedBatch decoded = new DecodedBatch(code.n());
+        decoder.decode(received, decoded);
+        ThreadMXBean thread = (ThreadMXBean) ManagementFactory.getThreadMXBean();
+        long before = thread.getThreadAllocatedBytes(Thread.currentThread().getId());
+        for (int i = 0; i < 100; i++) {
+            decoder.decode(received, decoded);
+        }
+        long allocated = thread.getThreadAllocatedBytes(Thread.currentThread().getId()) - before;
+        assertTrue(allocated < 100 * 16, "100 calls allocated " + allocated + " bytes");
     }
 }

@@ -52,7 +52,6 @@ class FixedPointMinSumTest {
             Random random,
             String seed) {
         UniformQuantiser quantiser = new UniformQuantiser(Math.min(words.posterior(), 8), 0.25f, Rise.MID_TREAD);
-        // A code with k >= 1 whatever the rank: one more column that no row sees.
         Code code = Code.ofParityCheck("test", "test", matrix);
         MinSumSettings settings = new MinSumSettings(iterations, correction, Optional.of(words));
         Decoder decoder = settings.newDecoder(code, quantiser);

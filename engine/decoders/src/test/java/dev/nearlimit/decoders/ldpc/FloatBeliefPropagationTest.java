@@ -32,11 +32,13 @@ class FloatBeliefPropagationTest {
         Random random = new Random(seed);
         int degree = 2 + random.nextInt(9);
         int lanes = 512;
-        float[] incoming = new float[degree * lanes];
-        for (int i = 0; i < incoming.length; i++) {
-            incoming[i] = (float) (random.nextGaussian() * 4);
+        float[][] incoming = new float[degree][lanes];
+        for (float[] ofEdge : incoming) {
+            for (int f = 0; f < lanes; f++) {
+                ofEdge[f] = (float) (random.nextGaussian() * 4);
+            }
         }
-        float[] message = new float[incoming.length];
+        float[][] message = new float[degree][lanes];
         new SumProductCheckRule(degree, lanes).apply(incoming, degree, lanes, message, 0);
         // d-2 operations lie behind a message, each adds twice the error of the correction; the operation does not
         // enlarge the error of its operands, since its derivatives do not exceed 1.
@@ -45,10 +47,10 @@ class FloatBeliefPropagationTest {
             for (int to = 0; to < degree; to++) {
                 double product = 1;
                 for (int i = 0; i < degree; i++) {
-                    product *= i == to ? 1 : StrictMath.tanh(incoming[i * lanes + lane] / 2.0);
+                    product *= i == to ? 1 : StrictMath.tanh(incoming[i][lane] / 2.0);
                 }
                 double exact = StrictMath.log((1 + product) / (1 - product));
-                assertEquals(exact, message[to * lanes + lane], allowed, "seed " + seed + " lane " + lane);
+                assertEquals(exact, message[to][lane], allowed, "seed " + seed + " lane " + lane);
             }
         }
     }

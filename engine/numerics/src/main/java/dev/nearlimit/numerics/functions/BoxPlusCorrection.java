@@ -39,10 +39,10 @@ public final class BoxPlusCorrection {
         return u * u;
     }
 
-    /** Replaces {@code count} values, each at least 0, by their approximations; a loop that the JIT turns into SIMD. */
-    public static void replace(float[] values, int from, int count) {
+    /** Replaces the first {@code count} values, each at least 0, by their approximations; the JIT makes SIMD of it. */
+    public static void replace(float[] values, int count) {
         for (int i = 0; i < count; i++) {
-            values[from + i] = of(values[from + i]);
+            values[i] = of(values[i]);
         }
     }
 }

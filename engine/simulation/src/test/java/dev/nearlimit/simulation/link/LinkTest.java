@@ -10,7 +10,9 @@ import dev.nearlimit.numerics.noise.UniformDraws;
 import dev.nearlimit.numerics.random.FrameStreams;
 import dev.nearlimit.numerics.random.Stream;
 import java.math.BigInteger;
+import java.nio.ByteBuffer;
 import java.util.SplittableRandom;
+import java.util.zip.CRC32C;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -80,6 +82,31 @@ class LinkTest {
         assertEquals(0, BinarySymmetricLink.threshold(0x1p-65));
         assertEquals(1, BinarySymmetricLink.threshold(0x1.8p-64));
         assertTrue(BinarySymmetricLink.threshold(Math.nextDown(0.5)) > 0);
+    }
+
+    /** Pinned: received values that change by a bit, on any machine, need a new revision. */
+    @Test
+    void receivedValuesStayWhatTheyAre() {
+        assertEquals(1, Link.REVISION);
+        assertEquals("f054e16", fingerprint(new GaussianLink(noise(), 0.7)));
+        assertEquals("20ee2a4b", fingerprint(new HardDecisionLink(noise(), 0.7)));
+        assertEquals("b938933c", fingerprint(new BinarySymmetricLink(draws(), 0.11)));
+    }
+
+    /** CRC-32C over the bits of the LLRs of 128 frames of 700 bits. */
+    private static String fingerprint(Link link) {
+        int n = 700;
+        long[] codeword = new long[n];
+        CRC32C crc = new CRC32C();
+        for (int batch = 0; batch < 2; batch++) {
+            new Payload(new UniformDraws(new FrameStreams(5, 6, Stream.PAYLOAD))).fill(64L * batch, codeword);
+            LlrBatch received = new LlrBatch(n);
+            link.carry(64L * batch, codeword, received);
+            ByteBuffer bytes = ByteBuffer.allocate(received.values().length * Float.BYTES);
+            bytes.asFloatBuffer().put(received.values());
+            crc.update(bytes.array());
+        }
+        return Long.toHexString(crc.getValue());
     }
 
     private static GaussianNoise noise() {

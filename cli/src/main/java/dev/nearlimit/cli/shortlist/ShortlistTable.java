@@ -1,0 +1,160 @@
+package dev.nearlimit.cli.shortlist;
+
+import dev.nearlimit.cli.output.Numbers;
+import dev.nearlimit.cli.output.TextTable;
+import dev.nearlimit.shortlist.result.OperatingPoint;
+import dev.nearlimit.shortlist.result.OperatingPoint.BudgetLine;
+import dev.nearlimit.shortlist.result.SchemeResult;
+import java.util.List;
+import java.util.Locale;
+
+/** The shortlist for a terminal of 80 columns: the answer first, then the budget, the ranked and the rejected. */
+final class ShortlistTable {
+    /** Rows of each table that are shown unless all are asked for. */
+    private static final int SHOWN = 12;
+
+    private final StringBuilder text = new StringBuilder();
+    private final boolean all;
+
+    private ShortlistTable(boolean all) {
+        this.all = all;
+    }
+
+    static String of(ShortlistRun run, boolean all) {
+        ShortlistTable table = new ShortlistTable(all);
+        table.write(run);
+        return table.text.toString();
+    }
+
+    private void write(ShortlistRun run) {
+        OperatingPoint point = run.point();
+        text.append(run.requirement().name()).append('\n');
+        if (!run.result().complete()) {
+            paragraph("INCOMPLETE: the run was interrupted; what follows is what it had found by then.");
+        }
+        text.append('\n');
+        paragraph(point.verdict());
+        text.append('\n');
+        budget(point);
+        List<SchemeResult> meeting =
+                point.schemes().stream().filter(SchemeResult::meets).toList();
+        List<SchemeResult> rejected =
+                point.schemes().stream().filter(scheme -> !scheme.meets()).toList();
+        if (!meeting.isEmpty()) {
+            ranked(meeting);
+        }
+        if (!rejected.isEmpty()) {
+            rejected(rejected);
+        }
+        text.append(String.format(
+                Locale.ROOT,
+                "%d schemes, %s codewords simulated, seed %d, %d %s, %s%n",
+                point.schemes().size(),
+                Numbers.engineering(run.result().framesSimulated()).trim(),
+                run.result().seed(),
+                run.threads(),
+                run.threads() == 1 ? "thread" : "threads",
+                Numbers.duration(run.elapsedS())));
+    }
+
+    private void budget(OperatingPoint point) {
+        TextTable table = new TextTable().words("link budget").numbers("value", "dB");
+        for (BudgetLine line : point.linkBudget()) {
+            table.row(line.item(), Numbers.db(line.db()));
+        }
+        text.append(table).append('\n');
+    }
+
+    private void ranked(List<SchemeResult> meeting) {
+        TextTable table = new TextTable()
+                .numbers("#")
+                .numbers("needed Eb/N0", "dB")
+                .numbers("margin", "dB")
+                .numbers("gain", "dB")
+                .numbers("gap", "dB")
+                .numbers("band", "kHz")
+                .numbers("ops/bit")
+                .words("scheme that meets every demand");
+        for (SchemeResult scheme : shown(meeting)) {
+            table.row(
+                    scheme.rank() + (scheme.tiedWithBest() && meeting.size() > 1 ? "=" : ""),
+                    needed(scheme),
+                    Numbers.db(scheme.marginDb()),
+                    optional(scheme.codingGainDb()),
+                    optional(ownGap(scheme)),
+                    Numbers.fixed(scheme.occupiedBandwidthHz() / 1000, 1),
+                    Numbers.fixed(scheme.operationsPerBit().worstCase(), 0),
+                    name(scheme));
+        }
+        text.append(table);
+        more(meeting);
+        text.append('\n');
+        paragraph("needed: with its 95 % interval (~ coarse, exact without). =: cannot be told apart from the best."
+                + " gain: over uncoded at the same BER. gap: to the limit of the modulation, or of hard decisions where"
+                + " the decoder is hard. ops/bit: decoder operations per information bit, worst case.");
+        text.append('\n');
+    }
+
+    private void rejected(List<SchemeResult> rejected) {
+        TextTable table = new TextTable().words("rejected, nearest first").words("fails");
+        for (SchemeResult scheme : shown(rejected)) {
+            table.row(shortName(scheme), ShortlistCsv.fails(scheme));
+        }
+        text.append(table);
+        more(rejected);
+        text.append('\n');
+    }
+
+    private List<SchemeResult> shown(List<SchemeResult> schemes) {
+        return all ? schemes : schemes.subList(0, Math.min(SHOWN, schemes.size()));
+    }
+
+    private void more(List<SchemeResult> schemes) {
+        int hidden = schemes.size() - shown(schemes).size();
+        if (hidden > 0) {
+            text.append("and ").append(hidden).append(" more: --all shows them here, the report has them too\n");
+        }
+    }
+
+    /** The estimate with half of its interval's width; the interval itself stands in the CSV and the report. */
+    private static String needed(SchemeResult scheme) {
+        String estimate = Numbers.db(scheme.neededEbn0Db());
+        if (scheme.stage().equals("exact")) {
+            return estimate + "      ";
+        }
+        if (scheme.neededEbn0DbLow() == null || scheme.neededEbn0DbHigh() == null) {
+            return estimate + " ?    ";
+        }
+        double half = (scheme.neededEbn0DbHigh() - scheme.neededEbn0DbLow()) / 2;
+        return estimate + (scheme.stage().equals("coarse") ? " ~" : " \u00b1") + Numbers.db(half);
+    }
+
+    private static Double ownGap(SchemeResult scheme) {
+        return scheme.gapToHardDecisionLimitDb() != null
+                ? scheme.gapToHardDecisionLimitDb()
+                : scheme.gapToModulationLimitDb();
+    }
+
+    private static String optional(Double value) {
+        return value == null ? Numbers.UNKNOWN : Numbers.db(value);
+    }
+
+    private static String name(SchemeResult scheme) {
+        return scheme.code() + " " + decoder(scheme) + " " + scheme.modulation();
+    }
+
+    private static String shortName(SchemeResult scheme) {
+        return scheme.code() + " " + decoder(scheme) + " " + scheme.modulation();
+    }
+
+    private static String decoder(SchemeResult scheme) {
+        String family = scheme.decoder().split(":", 2)[0];
+        return scheme.quantiser().equals("none") ? family : family + " (fixed point)";
+    }
+
+    private void paragraph(String words) {
+        for (String line : TextTable.wrap(words, TextTable.WIDTH)) {
+            text.append(line).append('\n');
+        }
+    }
+}

@@ -1,0 +1,64 @@
+package dev.nearlimit.shortlist;
+
+import dev.nearlimit.decoders.catalogue.DecoderChoice;
+import dev.nearlimit.limits.BinaryInputAwgn;
+import dev.nearlimit.limits.HardDecisionAwgn;
+import dev.nearlimit.limits.InvalidLimitException;
+import dev.nearlimit.limits.NormalApproximation;
+import dev.nearlimit.limits.ShannonLimit;
+import dev.nearlimit.shortlist.evaluation.PayloadFit;
+import dev.nearlimit.shortlist.result.SchemeResult.Limits;
+
+/**
+ * A code fitted to the payload with one decoder, and the limits at the rate that comes of it. Which modulation carries
+ * it is still open: BPSK and QPSK need the same Eb/N0.
+ *
+ * @param family the code's family
+ * @param fit the code as it carries the payload
+ * @param choice decoder and quantiser
+ * @param limits limits at the payload's rate and length
+ */
+record Contender(String family, PayloadFit fit, DecoderChoice choice, Limits limits) {
+
+    static Contender of(String family, PayloadFit fit, DecoderChoice choice) {
+        double rate = fit.rate();
+        return new Contender(
+                family,
+                fit,
+                choice,
+                new Limits(
+                        ShannonLimit.leastEbn0Db(rate),
+                        BinaryInputAwgn.leastEbn0Db(rate),
+                        HardDecisionAwgn.leastEbn0Db(rate),
+                        normalApproximation(fit)));
+    }
+
+    private static Double normalApproximation(PayloadFit fit) {
+        try {
+            return NormalApproximation.leastEbn0Db(fit.bitsSent(), fit.payloadBits(), fit.payloadFer());
+        } catch (InvalidLimitException e) {
+            // It does not exist for every length and error rate; the result says so by leaving it out.
+            return null;
+        }
+    }
+
+    /** The least Eb/N0 that any code of this rate could need with this kind of decoder [dB]. */
+    double ownLimitDb() {
+        return choice.decoder().hardDecision() ? limits.hardDecisionDb() : limits.modulationDb();
+    }
+
+    /** Operations per payload bit if every codeword takes the most iterations. */
+    double worstCaseOperationsPerBit() {
+        return operationsPerBit(choice.decoder().maxIterations()).total();
+    }
+
+    dev.nearlimit.decoders.OperationCount operationsPerBit(double iterations) {
+        return choice.decoder()
+                .operationsPerFrame(fit.code(), iterations)
+                .times((double) fit.codewords() / fit.payloadBits());
+    }
+
+    String describe() {
+        return fit.code().designator() + " with " + choice.decoder().designator();
+    }
+}

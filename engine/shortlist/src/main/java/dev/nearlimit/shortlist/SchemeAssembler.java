@@ -1,0 +1,186 @@
+package dev.nearlimit.shortlist;
+
+import dev.nearlimit.codes.KnownDistance;
+import dev.nearlimit.decoders.DecoderSettings;
+import dev.nearlimit.decoders.OperationCount;
+import dev.nearlimit.limits.UncodedBinary;
+import dev.nearlimit.shortlist.evaluation.ErrorCurve;
+import dev.nearlimit.shortlist.evaluation.ExactErrorRate;
+import dev.nearlimit.shortlist.evaluation.PayloadFit;
+import dev.nearlimit.shortlist.result.SchemeResult;
+import dev.nearlimit.shortlist.result.SchemeResult.ExactPoint;
+import dev.nearlimit.shortlist.result.SchemeResult.Failure;
+import dev.nearlimit.shortlist.result.SchemeResult.Latency;
+import dev.nearlimit.shortlist.result.SchemeResult.Operations;
+import dev.nearlimit.shortlist.result.SchemeResult.Point;
+import dev.nearlimit.simulation.PointCounts;
+import dev.nearlimit.simulation.search.MeasuredPoint;
+import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
+import dev.nearlimit.simulation.statistics.Interval;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.TreeMap;
+
+/** Writes down what is known of a contender carried by one modulation: the row of the shortlist, before it is ranked. */
+final class SchemeAssembler {
+    private static final ErrorRateIntervals INTERVALS = new ErrorRateIntervals();
+
+    /** Grid of the exact curves drawn in charts [dB]. */
+    private static final double EXACT_STEP_DB = 0.25;
+
+    private final Demands demands;
+
+    SchemeAssembler(Demands demands) {
+        this.demands = demands;
+    }
+
+    SchemeResult assemble(Standing standing, Carriage carriage) {
+        Contender contender = standing.contender();
+        PayloadFit fit = contender.fit();
+        DecoderSettings decoder = contender.choice().decoder();
+        ErrorCurve curve = standing.curve();
+        List<Failure> failures = demands.failures(standing, carriage);
+        Double needed = known(standing.neededDb());
+        Double ber = curve == null ? null : known(curve.berAtNeeded());
+        Double codingGain =
+                needed == null || ber == null ? null : UncodedBinary.ebn0DbForBitErrorRate(ber) - needed;
+        Double iterations = averageIterations(standing, decoder);
+        return new SchemeResult(
+                null,
+                fit.code().designator(),
+                contender.family(),
+                decoder.designator(),
+                carriage.modulation().designator(),
+                contender.choice().quantiser().designator(),
+                "awgn",
+                fit.code().n(),
+                fit.code().k(),
+                fit.code().rate().toString(),
+                fit.codewords(),
+                fit.payloadBits() + "/" + fit.bitsSent(),
+                fit.codewordFerTarget(),
+                needed,
+                needed == null ? null : known(standing.neededLowDb()),
+                needed == null ? null : known(standing.neededHighDb()),
+                needed == null ? "none" : curve.method(),
+                curve == null ? "" : curve.how(),
+                needed == null ? null : demands.leftDb() - needed,
+                codingGain,
+                codingGain == null ? "none" : "simulated",
+                ber,
+                gap(needed, contender.limits().shannonDb()),
+                gap(needed, contender.limits().modulationDb()),
+                decoder.hardDecision() ? gap(needed, contender.limits().hardDecisionDb()) : null,
+                gap(needed, contender.limits().normalApproximationDb()),
+                "estimated: normal approximation, not a bound",
+                contender.limits(),
+                undetectedUpper(curve),
+                new Latency(null, carriage.airS(), null, null, carriage.airS()),
+                carriage.symbolRateBaud(),
+                carriage.occupiedBandwidthHz(),
+                fit.rate(),
+                (double) fit.payloadBits() / carriage.symbolsPerPayload(),
+                operations(contender, iterations),
+                iterations,
+                fit.code().knownDistance().map(KnownDistance::value).orElse(null),
+                needed != null && failures.isEmpty(),
+                failures,
+                false,
+                false,
+                needed == null ? "dropped" : curve.stage(),
+                note(standing, needed, failures),
+                points(standing),
+                exactCurve(standing));
+    }
+
+    private String note(Standing standing, Double needed, List<Failure> failures) {
+        boolean marginUncertain = needed != null && failures.isEmpty() && standing.neededHighDb() > demands.leftDb();
+        return marginUncertain ? "its interval reaches beyond the available Eb/N0" : standing.note();
+    }
+
+    private static Double averageIterations(Standing standing, DecoderSettings decoder) {
+        MeasuredPoint near = standing.curve() == null ? null : standing.curve().nearNeeded();
+        if (decoder.maxIterations() == 0 || near == null) {
+            return null;
+        }
+        return (double) near.counts().iterations() / near.counts().frames();
+    }
+
+    private static Operations operations(Contender contender, Double iterations) {
+        double worst = contender.worstCaseOperationsPerBit();
+        if (contender.choice().decoder().maxIterations() > 0 && iterations == null) {
+            return new Operations(null, null, null, null, worst);
+        }
+        OperationCount count = contender.operationsPerBit(iterations == null ? 0 : iterations);
+        return new Operations(count.additions(), count.comparisons(), count.lookups(), count.total(), worst);
+    }
+
+    private static Double undetectedUpper(ErrorCurve curve) {
+        if (curve == null || curve.nearNeeded() == null) {
+            return null;
+        }
+        return INTERVALS.undetectedErrorRateUpper(curve.nearNeeded().counts());
+    }
+
+    private static List<Point> points(Standing standing) {
+        TreeMap<Long, MeasuredPoint> all = new TreeMap<>();
+        if (standing.trial() != null) {
+            all.put(standing.trial().microDb(), standing.trial());
+        }
+        if (standing.curve() != null) {
+            for (MeasuredPoint point : standing.curve().points()) {
+                all.put(point.microDb(), point);
+            }
+        }
+        List<Point> points = new ArrayList<>();
+        for (MeasuredPoint point : all.values()) {
+            points.add(point(standing.contender(), point));
+        }
+        return points;
+    }
+
+    private static Point point(Contender contender, MeasuredPoint point) {
+        PointCounts counts = point.counts();
+        int k = contender.fit().code().k();
+        Interval fer = INTERVALS.frameErrorRate(counts, point.rule());
+        Interval ber = INTERVALS.bitErrorRate(counts, k);
+        return new Point(
+                point.ebn0Db() + contender.fit().fillerDb(),
+                counts.frames(),
+                counts.frameErrors(),
+                counts.bitErrors(),
+                counts.undetectedErrors(),
+                point.fer(),
+                fer.low(),
+                fer.high(),
+                (double) counts.bitErrors() / ((double) counts.frames() * k),
+                ber.low(),
+                ber.high(),
+                (double) counts.iterations() / counts.frames(),
+                counts.complete());
+    }
+
+    /** The exact FER from well above to well below the target, for drawing. */
+    private static List<ExactPoint> exactCurve(Standing standing) {
+        ExactErrorRate exact = standing.curve() == null ? null : standing.curve().exact();
+        if (exact == null) {
+            return null;
+        }
+        double needed = standing.curve().neededDb();
+        double filler = standing.contender().fit().fillerDb();
+        List<ExactPoint> points = new ArrayList<>();
+        double first = Math.floor((needed - 5) / EXACT_STEP_DB) * EXACT_STEP_DB;
+        for (double at = first; at <= needed + 1; at += EXACT_STEP_DB) {
+            points.add(new ExactPoint(at + filler, exact.frameErrorRate(at)));
+        }
+        return points;
+    }
+
+    private static Double gap(Double needed, Double limit) {
+        return needed == null || limit == null ? null : needed - limit;
+    }
+
+    private static Double known(double value) {
+        return Double.isNaN(value) || Double.isInfinite(value) ? null : value;
+    }
+}

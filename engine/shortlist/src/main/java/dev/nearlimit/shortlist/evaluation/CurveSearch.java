@@ -1,0 +1,163 @@
+package dev.nearlimit.shortlist.evaluation;
+
+import dev.nearlimit.simulation.PointCounts;
+import dev.nearlimit.simulation.StoppingRule;
+import dev.nearlimit.simulation.search.ErrorRateMeter;
+import dev.nearlimit.simulation.search.MeasuredPoint;
+import dev.nearlimit.simulation.search.NeededEbn0;
+import dev.nearlimit.simulation.search.NeededEbn0Search;
+import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
+import dev.nearlimit.simulation.statistics.Interval;
+import java.util.List;
+import java.util.Locale;
+import java.util.Objects;
+import java.util.stream.Stream;
+
+/**
+ * Finds one contender's error curve in steps that a shortlist may stop after: a trial at the available Eb/N0, a coarse
+ * bracket, a refined one. Points measured in one step serve the next.
+ */
+public final class CurveSearch {
+    /** Frame errors that end a point of the trial and of the coarse bracket: a few dozen. */
+    public static final long COARSE_ERRORS = 32;
+
+    /** Frame errors that end a point of the refined bracket. */
+    public static final long REFINED_ERRORS = 120;
+
+    /** Codewords that one point may take at most, so that a hopeless point ends. */
+    private static final long MOST_FRAMES = 20_000_000;
+
+    private final ErrorRateMeter meter;
+    private final int informationBits;
+    private final double targetFer;
+    private final NeededEbn0Search search;
+
+    /**
+     * @param meter counts errors of the contender
+     * @param informationBits information bits a codeword
+     * @param targetFer FER that a codeword may have
+     */
+    public CurveSearch(ErrorRateMeter meter, int informationBits, double targetFer) {
+        this.meter = meter;
+        this.informationBits = informationBits;
+        this.targetFer = targetFer;
+        this.search = new NeededEbn0Search(meter, targetFer, MOST_FRAMES);
+    }
+
+    /**
+     * What a trial at one Eb/N0 showed.
+     *
+     * @param point the counts
+     * @param fer 95 % interval of the FER
+     * @param above whether that interval lies above the target
+     */
+    public record Trial(MeasuredPoint point, Interval fer, boolean above) {}
+
+    /** Tries the contender at one Eb/N0 with a few dozen frame errors. */
+    public Trial trial(double ebn0Db) {
+        MeasuredPoint point = measure(ebn0Db, COARSE_ERRORS);
+        Interval fer = new ErrorRateIntervals().frameErrorRate(point.counts(), point.rule());
+        return new Trial(point, fer, fer.low() > targetFer);
+    }
+
+    /**
+     * Brackets the needed Eb/N0 between points at most 0.25 dB apart.
+     *
+     * @param startDb where to begin [dB]
+     * @param giveUpDb highest Eb/N0 to try [dB]
+     */
+    public ErrorCurve coarse(double startDb, double giveUpDb) {
+        return simulated(search.bracket(startDb, giveUpDb, COARSE_ERRORS), "coarse");
+    }
+
+    /** Narrows what {@link #coarse} found. */
+    public ErrorCurve refined() {
+        return simulated(search.refine(REFINED_ERRORS), "refined");
+    }
+
+    /**
+     * The curve of a contender whose FER is known exactly. What the formula does not give, wrong bits a failed frame and
+     * undetected errors, is measured at the needed Eb/N0.
+     */
+    public ErrorCurve exact(ExactErrorRate rate) {
+        double needed = rate.neededEbn0Db(targetFer);
+        MeasuredPoint point = measure(needed, 2 * COARSE_ERRORS);
+        return new ErrorCurve(
+                needed,
+                needed,
+                needed,
+                "exact",
+                rate.how(),
+                "exact",
+                List.of(point),
+                rate,
+                point,
+                bitErrorRate(point, null),
+                point.counts().complete());
+    }
+
+    /** The same curve for a contender out of the running: what the formula gives, and nothing measured. */
+    public static ErrorCurve unmeasured(ExactErrorRate rate, double targetFer) {
+        double needed = rate.neededEbn0Db(targetFer);
+        return new ErrorCurve(
+                needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, Double.NaN, true);
+    }
+
+    private MeasuredPoint measure(double ebn0Db, long errors) {
+        long microDb = Math.round(ebn0Db * 1e6);
+        StoppingRule rule =
+                new StoppingRule((long) Math.min(MOST_FRAMES, Math.ceil(errors / targetFer)), errors);
+        PointCounts counts = meter.measure(microDb, rule);
+        return new MeasuredPoint(microDb, counts, rule);
+    }
+
+    private ErrorCurve simulated(NeededEbn0 found, String stage) {
+        MeasuredPoint near = found.bracketHigh() != null ? found.bracketHigh() : found.bracketLow();
+        return new ErrorCurve(
+                found.ebn0Db(),
+                found.lowDb(),
+                found.highDb(),
+                "simulated",
+                describe(found),
+                found.bracketed() ? stage : "coarse",
+                found.points(),
+                null,
+                near,
+                bitErrorRate(found.bracketLow(), found.bracketHigh()),
+                found.complete());
+    }
+
+    /**
+     * Information-bit error rate where the FER is the target: target times wrong bits a failed frame, which hardly
+     * changes over a bracket and is therefore taken from both of its ends together.
+     */
+    private double bitErrorRate(MeasuredPoint first, MeasuredPoint second) {
+        long bits = 0;
+        long frames = 0;
+        for (MeasuredPoint point : Stream.of(first, second).filter(Objects::nonNull).toList()) {
+            bits += point.counts().bitErrors();
+            frames += point.counts().frameErrors();
+        }
+        return bits == 0 ? Double.NaN : targetFer * bits / ((double) frames * informationBits);
+    }
+
+    private static String describe(NeededEbn0 found) {
+        if (!found.bracketed()) {
+            return found.bracketLow() == null
+                    ? "target met at every Eb/N0 tried"
+                    : String.format(
+                            Locale.ROOT,
+                            "target not met up to %.2f dB",
+                            found.bracketLow().ebn0Db());
+        }
+        return String.format(
+                Locale.ROOT,
+                "log FER interpolated between %.2f dB (%d errors in %d frames) and %.2f dB (%d in %d)",
+                found.bracketLow().ebn0Db(),
+                found.bracketLow().counts().frameErrors(),
+                found.bracketLow().counts().frames(),
+                found.bracketHigh().ebn0Db(),
+                found.bracketHigh().counts().frameErrors(),
+                found.bracketHigh().counts().frames());
+    }
+}
