@@ -1,6 +1,5 @@
 package dev.nearlimit.cli.requirement;
 
-import dev.nearlimit.cli.failure.InputException;
 import dev.nearlimit.codes.Code;
 import dev.nearlimit.codes.catalogue.Catalogue;
 import dev.nearlimit.codes.family.CodeFamily;
@@ -87,7 +86,8 @@ final class CandidateReader {
         if (fields.has("matrix")) {
             MatrixRole role = role(fields);
             Path file = folder.resolve(designator);
-            return new Named(fields.located(place, () -> MatrixFile.readCode(file, role, MatrixLimits.standard())), "matrix");
+            return new Named(
+                    fields.located(place, () -> MatrixFile.readCode(file, role, MatrixLimits.standard())), "matrix");
         }
         String family = designator.split(":", 2)[0];
         return new Named(fields.located(place, () -> catalogue.build(designator)), family);
@@ -104,11 +104,10 @@ final class CandidateReader {
     }
 
     private static void requireFit(FieldReader fields, YamlNode place, DecoderChoice choice, Code code) {
-        DecoderFamily family = DecoderCatalogue.standard().family(choice.decoder().family());
+        DecoderFamily family =
+                DecoderCatalogue.standard().family(choice.decoder().family());
         family.objection(code).ifPresent(why -> {
-            throw fields.at(
-                    place,
-                    "decoder " + family.name() + " does not fit " + code.designator() + ": " + why);
+            throw fields.at(place, "decoder " + family.name() + " does not fit " + code.designator() + ": " + why);
         });
     }
 }

@@ -30,7 +30,8 @@ public final class RequirementReader {
         FieldReader root = new FieldReader(file.toString(), "", YamlFile.read(file));
         RequirementReader reader = new RequirementReader(root);
         try {
-            return reader.requirement(new CandidateReader(root, file.toAbsolutePath().getParent()));
+            return reader.requirement(
+                    new CandidateReader(root, file.toAbsolutePath().getParent()));
         } catch (InvalidRequirementException e) {
             throw reader.at(e);
         }
@@ -45,8 +46,8 @@ public final class RequirementReader {
         OptionalDouble operationsPerBit = root.optionalGroup("decoderBudget")
                 .map(RequirementReader::operationsPerBit)
                 .orElse(OptionalDouble.empty());
-        Requirement requirement = new Requirement(
-                name, description, link, payload, latencyS, operationsPerBit, candidates.read());
+        Requirement requirement =
+                new Requirement(name, description, link, payload, latencyS, operationsPerBit, candidates.read());
         root.refuseUnknown();
         return requirement;
     }

@@ -23,7 +23,6 @@ final class ProgressLine {
     /** The simulator has counted frames of the point under way. */
     synchronized void counted(long frames, long frameErrors) {
         progress.at(
-                fraction,
-                stage + ": " + Numbers.engineering(frames).trim() + " frames, " + frameErrors + " errors");
+                fraction, stage + ": " + Numbers.engineering(frames).trim() + " frames, " + frameErrors + " errors");
     }
 }

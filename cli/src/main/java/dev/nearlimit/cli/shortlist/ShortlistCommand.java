@@ -71,7 +71,8 @@ public final class ShortlistCommand implements Callable<Integer> {
             names = "--seed",
             paramLabel = "N",
             defaultValue = "1",
-            description = "Seed of all random numbers (default: ${DEFAULT-VALUE}); the same seed gives the same result.")
+            description =
+                    "Seed of all random numbers (default: ${DEFAULT-VALUE}); the same seed gives the same result.")
     private long seed;
 
     @Mixin

@@ -13,12 +13,7 @@ import dev.nearlimit.shortlist.result.ShortlistResult;
  * @param elapsedS time taken [s]
  */
 record ShortlistRun(
-        Requirement requirement,
-        ShortlistResult result,
-        String file,
-        String command,
-        int threads,
-        double elapsedS) {
+        Requirement requirement, ShortlistResult result, String file, String command, int threads, double elapsedS) {
     OperatingPoint point() {
         return result.operatingPoints().get(0);
     }

@@ -5,13 +5,19 @@ import dev.nearlimit.cli.output.TextTable;
 import dev.nearlimit.shortlist.result.OperatingPoint;
 import dev.nearlimit.shortlist.result.OperatingPoint.BudgetLine;
 import dev.nearlimit.shortlist.result.SchemeResult;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
+import java.util.stream.Collectors;
 
 /** The shortlist for a terminal of 80 columns: the answer first, then the budget, the ranked and the rejected. */
 final class ShortlistTable {
     /** Rows of each table that are shown unless all are asked for. */
     private static final int SHOWN = 12;
+
+    private static final String NUMBERS = "%3s %16s %9s %8s %8s %8s %10s%n";
 
     private final StringBuilder text = new StringBuilder();
     private final boolean all;
@@ -65,43 +71,59 @@ final class ShortlistTable {
         text.append(table).append('\n');
     }
 
+    /** Two lines a scheme: what it is, and below its numbers. */
     private void ranked(List<SchemeResult> meeting) {
-        TextTable table = new TextTable()
-                .numbers("#")
-                .numbers("needed Eb/N0", "dB")
-                .numbers("margin", "dB")
-                .numbers("gain", "dB")
-                .numbers("gap", "dB")
-                .numbers("band", "kHz")
-                .numbers("ops/bit")
-                .words("scheme that meets every demand");
+        text.append("Meets every demand\n\n");
+        text.append(
+                String.format(Locale.ROOT, NUMBERS, "", "needed Eb/N0", "margin", "gain", "gap", "band", "ops/bit"));
+        text.append(String.format(Locale.ROOT, NUMBERS, "", "[dB]", "[dB]", "[dB]", "[dB]", "[kHz]", "worst"));
         for (SchemeResult scheme : shown(meeting)) {
-            table.row(
-                    scheme.rank() + (scheme.tiedWithBest() && meeting.size() > 1 ? "=" : ""),
+            boolean tied = scheme.tiedWithBest() && meeting.size() > 1;
+            text.append(String.format(Locale.ROOT, "%3d%s %s%n", scheme.rank(), tied ? "=" : " ", name(scheme)));
+            text.append(String.format(
+                    Locale.ROOT,
+                    NUMBERS,
+                    "",
                     needed(scheme),
                     Numbers.db(scheme.marginDb()),
                     optional(scheme.codingGainDb()),
                     optional(ownGap(scheme)),
                     Numbers.fixed(scheme.occupiedBandwidthHz() / 1000, 1),
-                    Numbers.fixed(scheme.operationsPerBit().worstCase(), 0),
-                    name(scheme));
+                    Numbers.fixed(scheme.operationsPerBit().worstCase(), 0)));
         }
-        text.append(table);
-        more(meeting);
+        more(meeting.size());
         text.append('\n');
-        paragraph("needed: with its 95 % interval (~ coarse, exact without). =: cannot be told apart from the best."
-                + " gain: over uncoded at the same BER. gap: to the limit of the modulation, or of hard decisions where"
-                + " the decoder is hard. ops/bit: decoder operations per information bit, worst case.");
+        paragraph("needed: \u00b1 half of its 95 % interval, ~ where only bracketed coarsely, alone where exact."
+                + " =: cannot be told apart from the best. gain: over uncoded at the same BER. gap: to the limit of the"
+                + " modulation at this rate, or of hard decisions where the decoder is hard. ops/bit: decoder operations"
+                + " per information bit in the worst case.");
         text.append('\n');
     }
 
+    /** Schemes that differ in modulation alone and fail alike stand together. */
     private void rejected(List<SchemeResult> rejected) {
-        TextTable table = new TextTable().words("rejected, nearest first").words("fails");
-        for (SchemeResult scheme : shown(rejected)) {
-            table.row(shortName(scheme), ShortlistCsv.fails(scheme));
+        text.append("Rejected, nearest first\n\n");
+        Map<String, List<SchemeResult>> alike = new LinkedHashMap<>();
+        for (SchemeResult scheme : rejected) {
+            alike.computeIfAbsent(codeAndDecoder(scheme) + ShortlistCsv.fails(scheme), key -> new ArrayList<>())
+                    .add(scheme);
         }
-        text.append(table);
-        more(rejected);
+        List<List<SchemeResult>> groups = List.copyOf(alike.values());
+        int rows = all ? groups.size() : Math.min(SHOWN, groups.size());
+        for (List<SchemeResult> group : groups.subList(0, rows)) {
+            String modulations = group.stream()
+                    .map(scheme -> scheme.modulation().toUpperCase(Locale.ROOT))
+                    .collect(Collectors.joining(" or "));
+            text.append("  ")
+                    .append(codeAndDecoder(group.get(0)))
+                    .append(", ")
+                    .append(modulations)
+                    .append('\n');
+            for (String line : TextTable.wrap(ShortlistCsv.fails(group.get(0)), TextTable.WIDTH - 6)) {
+                text.append("      ").append(line).append('\n');
+            }
+        }
+        more(groups.size());
         text.append('\n');
     }
 
@@ -109,10 +131,10 @@ final class ShortlistTable {
         return all ? schemes : schemes.subList(0, Math.min(SHOWN, schemes.size()));
     }
 
-    private void more(List<SchemeResult> schemes) {
-        int hidden = schemes.size() - shown(schemes).size();
+    private void more(int rows) {
+        int hidden = all ? 0 : rows - SHOWN;
         if (hidden > 0) {
-            text.append("and ").append(hidden).append(" more: --all shows them here, the report has them too\n");
+            text.append("  and ").append(hidden).append(" more: --all shows them here, the report has them too\n");
         }
     }
 
@@ -120,10 +142,10 @@ final class ShortlistTable {
     private static String needed(SchemeResult scheme) {
         String estimate = Numbers.db(scheme.neededEbn0Db());
         if (scheme.stage().equals("exact")) {
-            return estimate + "      ";
+            return estimate;
         }
         if (scheme.neededEbn0DbLow() == null || scheme.neededEbn0DbHigh() == null) {
-            return estimate + " ?    ";
+            return estimate + " ?";
         }
         double half = (scheme.neededEbn0DbHigh() - scheme.neededEbn0DbLow()) / 2;
         return estimate + (scheme.stage().equals("coarse") ? " ~" : " \u00b1") + Numbers.db(half);
@@ -140,11 +162,11 @@ final class ShortlistTable {
     }
 
     private static String name(SchemeResult scheme) {
-        return scheme.code() + " " + decoder(scheme) + " " + scheme.modulation();
+        return codeAndDecoder(scheme) + ", " + scheme.modulation().toUpperCase(Locale.ROOT);
     }
 
-    private static String shortName(SchemeResult scheme) {
-        return scheme.code() + " " + decoder(scheme) + " " + scheme.modulation();
+    private static String codeAndDecoder(SchemeResult scheme) {
+        return scheme.code() + ", " + decoder(scheme);
     }
 
     private static String decoder(SchemeResult scheme) {

@@ -19,7 +19,6 @@ import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
 import dev.nearlimit.simulation.statistics.Interval;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.TreeMap;
 
 /** Writes down what is known of a contender carried by one modulation: the row of the shortlist, before it is ranked. */
 final class SchemeAssembler {
@@ -42,8 +41,7 @@ final class SchemeAssembler {
         List<Failure> failures = demands.failures(standing, carriage);
         Double needed = known(standing.neededDb());
         Double ber = curve == null ? null : known(curve.berAtNeeded());
-        Double codingGain =
-                needed == null || ber == null ? null : UncodedBinary.ebn0DbForBitErrorRate(ber) - needed;
+        Double codingGain = needed == null || ber == null ? null : UncodedBinary.ebn0DbForBitErrorRate(ber) - needed;
         Double iterations = averageIterations(standing, decoder);
         return new SchemeResult(
                 null,
@@ -123,17 +121,11 @@ final class SchemeAssembler {
     }
 
     private static List<Point> points(Standing standing) {
-        TreeMap<Long, MeasuredPoint> all = new TreeMap<>();
-        if (standing.trial() != null) {
-            all.put(standing.trial().microDb(), standing.trial());
-        }
-        if (standing.curve() != null) {
-            for (MeasuredPoint point : standing.curve().points()) {
-                all.put(point.microDb(), point);
-            }
+        if (standing.curve() == null) {
+            return List.of();
         }
         List<Point> points = new ArrayList<>();
-        for (MeasuredPoint point : all.values()) {
+        for (MeasuredPoint point : standing.curve().points()) {
             points.add(point(standing.contender(), point));
         }
         return points;
@@ -162,7 +154,8 @@ final class SchemeAssembler {
 
     /** The exact FER from well above to well below the target, for drawing. */
     private static List<ExactPoint> exactCurve(Standing standing) {
-        ExactErrorRate exact = standing.curve() == null ? null : standing.curve().exact();
+        ExactErrorRate exact =
+                standing.curve() == null ? null : standing.curve().exact();
         if (exact == null) {
             return null;
         }

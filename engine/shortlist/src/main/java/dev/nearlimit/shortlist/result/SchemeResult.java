@@ -163,8 +163,7 @@ public record SchemeResult(
      * @param hardDecisionDb hard decisions
      * @param normalApproximationDb normal approximation for the whole payload; null where it does not exist
      */
-    public record Limits(
-            double shannonDb, double modulationDb, double hardDecisionDb, Double normalApproximationDb) {}
+    public record Limits(double shannonDb, double modulationDb, double hardDecisionDb, Double normalApproximationDb) {}
 
     /**
      * Latency [s]; parts that nothing is known about are null.
