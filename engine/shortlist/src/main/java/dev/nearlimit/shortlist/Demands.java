@@ -82,16 +82,16 @@ final class Demands {
         double limit = standing.contender().ownLimitDb();
         if (!Double.isNaN(needed)) {
             if (needed > leftDb) {
-                failures.add(new Failure(demand, String.format(Locale.ROOT, "needs %.2f dB more", needed - leftDb)));
+                failures.add(new Failure(demand, "needs " + Units.decibels(needed - leftDb) + " more"));
             }
         } else if (limit > leftDb) {
             failures.add(new Failure(
                     demand,
                     String.format(
                             Locale.ROOT,
-                            "the limit at its rate alone, %.2f dB, needs %.2f dB more",
+                            "the limit at its rate alone, %.2f dB, needs %s more",
                             limit,
-                            limit - leftDb)));
+                            Units.decibels(limit - leftDb))));
         } else if (standing.curve() != null && standing.curve().nearNeeded() != null) {
             MeasuredPoint last = standing.curve().nearNeeded();
             double low = new ErrorRateIntervals()
