@@ -4,6 +4,7 @@ import dev.nearlimit.codes.KnownDistance;
 import dev.nearlimit.decoders.DecoderSettings;
 import dev.nearlimit.decoders.OperationCount;
 import dev.nearlimit.limits.UncodedBinary;
+import dev.nearlimit.shortlist.evaluation.BitErrorRate;
 import dev.nearlimit.shortlist.evaluation.ErrorCurve;
 import dev.nearlimit.shortlist.evaluation.ExactErrorRate;
 import dev.nearlimit.shortlist.evaluation.PayloadFit;
@@ -40,8 +41,7 @@ final class SchemeAssembler {
         ErrorCurve curve = standing.curve();
         List<Failure> failures = demands.failures(standing, carriage);
         Double needed = known(standing.neededDb());
-        Double ber = curve == null ? null : known(curve.berAtNeeded());
-        Double codingGain = needed == null || ber == null ? null : UncodedBinary.ebn0DbForBitErrorRate(ber) - needed;
+        BitErrorRate ber = curve == null || needed == null ? null : curve.berAtNeeded();
         Double iterations = averageIterations(standing, decoder);
         return new SchemeResult(
                 null,
@@ -63,9 +63,11 @@ final class SchemeAssembler {
                 needed == null ? "none" : curve.method(),
                 curve == null ? "" : curve.how(),
                 needed == null ? null : demands.leftDb() - needed,
-                codingGain,
-                codingGain == null ? "none" : "simulated",
-                ber,
+                ber == null ? null : codingGainDb(ber.value(), needed),
+                ber == null ? null : codingGainDb(ber.interval().high(), needed),
+                ber == null ? null : codingGainDb(ber.interval().low(), needed),
+                ber == null ? "none" : "simulated",
+                ber == null ? null : ber.value(),
                 gap(needed, contender.limits().shannonDb()),
                 gap(needed, contender.limits().modulationDb()),
                 decoder.hardDecision() ? gap(needed, contender.limits().hardDecisionDb()) : null,
@@ -94,6 +96,11 @@ final class SchemeAssembler {
     private String note(Standing standing, Double needed, List<Failure> failures) {
         boolean marginUncertain = needed != null && failures.isEmpty() && standing.neededHighDb() > demands.leftDb();
         return marginUncertain ? "its interval reaches beyond the available Eb/N0" : standing.note();
+    }
+
+    /** Null where the BER is so uncertain that it tells nothing: 0, or one half and more. */
+    private static Double codingGainDb(double ber, double neededDb) {
+        return ber > 0 && ber < 0.5 ? UncodedBinary.ebn0DbForBitErrorRate(ber) - neededDb : null;
     }
 
     private static Double averageIterations(Standing standing, DecoderSettings decoder) {

@@ -7,10 +7,10 @@ import dev.nearlimit.simulation.search.MeasuredPoint;
 import dev.nearlimit.simulation.search.NeededEbn0;
 import dev.nearlimit.simulation.search.NeededEbn0Search;
 import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
-import java.util.stream.Stream;
 
 /**
  * Finds one contender's error curve in steps that a shortlist may stop after: a coarse bracket, a refined one.
@@ -87,15 +87,14 @@ public final class CurveSearch {
                 List.of(point),
                 rate,
                 point,
-                bitErrorRate(point, null),
+                bitErrorRate(point),
                 point.counts().complete());
     }
 
     /** The same curve for a contender out of the running: what the formula gives, and nothing measured. */
     public static ErrorCurve unmeasured(ExactErrorRate rate, double targetFer) {
         double needed = rate.neededEbn0Db(targetFer);
-        return new ErrorCurve(
-                needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, Double.NaN, true);
+        return new ErrorCurve(needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, null, true);
     }
 
     private MeasuredPoint measure(double ebn0Db, long errors) {
@@ -121,19 +120,10 @@ public final class CurveSearch {
                 found.complete());
     }
 
-    /**
-     * Information-bit error rate where the FER is the target: target times wrong bits a failed frame, which hardly
-     * changes over a bracket and is therefore taken from both of its ends together.
-     */
-    private double bitErrorRate(MeasuredPoint first, MeasuredPoint second) {
-        long bits = 0;
-        long frames = 0;
-        for (MeasuredPoint point :
-                Stream.of(first, second).filter(Objects::nonNull).toList()) {
-            bits += point.counts().bitErrors();
-            frames += point.counts().frameErrors();
-        }
-        return bits == 0 ? Double.NaN : targetFer * bits / ((double) frames * informationBits);
+    private BitErrorRate bitErrorRate(MeasuredPoint... points) {
+        List<MeasuredPoint> measured =
+                Arrays.stream(points).filter(Objects::nonNull).toList();
+        return BitErrorRate.at(targetFer, measured, informationBits).orElse(null);
     }
 
     private static String describe(NeededEbn0 found) {
