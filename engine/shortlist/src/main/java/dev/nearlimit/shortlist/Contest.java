@@ -107,10 +107,13 @@ final class Contest {
     private void bracketWithinReach(Standing standing) {
         double reachDb = demands.leftDb() - standing.contender().fit().fillerDb();
         bracket(standing, reachDb);
+        if (!standing.curve().complete()) {
+            return;
+        }
         if (!standing.curve().found() && !standing.search().missesForSure(standing.curve())) {
             bracket(standing, reachDb + BEYOND_REACH_DB);
         }
-        if (!standing.curve().found()) {
+        if (standing.curve().complete() && !standing.curve().found()) {
             standing.drop(String.format(
                     Locale.ROOT,
                     "dropped after %d frame errors at the available Eb/N0",

@@ -77,6 +77,9 @@ public final class CurveSearch {
     public ErrorCurve exact(ExactErrorRate rate) {
         double needed = rate.neededEbn0Db(targetFer);
         MeasuredPoint point = measure(needed, 2 * COARSE_ERRORS);
+        if (point.counts().frames() == 0) {
+            return withoutMeasurement(rate, targetFer, false);
+        }
         return new ErrorCurve(
                 needed,
                 needed,
@@ -93,8 +96,13 @@ public final class CurveSearch {
 
     /** The same curve for a contender out of the running: what the formula gives, and nothing measured. */
     public static ErrorCurve unmeasured(ExactErrorRate rate, double targetFer) {
+        return withoutMeasurement(rate, targetFer, true);
+    }
+
+    private static ErrorCurve withoutMeasurement(ExactErrorRate rate, double targetFer, boolean complete) {
         double needed = rate.neededEbn0Db(targetFer);
-        return new ErrorCurve(needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, null, true);
+        return new ErrorCurve(
+                needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, null, complete);
     }
 
     private MeasuredPoint measure(double ebn0Db, long errors) {
