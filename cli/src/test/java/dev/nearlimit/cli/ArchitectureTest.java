@@ -31,7 +31,7 @@ final class ArchitectureTest {
             .definedBy(ROOM + "decoders..")
             .layer("simulation")
             .definedBy(ROOM + "simulation..")
-            .optionalLayer("shortlist")
+            .layer("shortlist")
             .definedBy(ROOM + "shortlist..")
             .layer("testvectors")
             .definedBy(ROOM + "testvectors..")

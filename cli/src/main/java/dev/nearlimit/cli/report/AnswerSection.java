@@ -27,26 +27,30 @@ final class AnswerSection {
 
     private void write() {
         Optional<SchemeEntry> winner = point.winner();
+        Optional<SchemeEntry> spokenOf =
+                winner.or(() -> point.schemes().stream().findFirst());
         html.open("div", "class", winner.isPresent() ? "answer" : "answer unmet");
+        html.element(
+                "p",
+                winner.isPresent() ? "\u2713 The requirement can be met" : "\u2717 No scheme meets every demand",
+                "class",
+                "verdict");
+        html.open("p");
         if (winner.isPresent()) {
-            html.element("p", "\u2713 The requirement can be met", "class", "verdict");
-            html.open("p");
             writeWinner(winner.get());
+        } else if (spokenOf.isPresent()) {
+            writeClosest(spokenOf.get());
         } else {
-            html.element("p", "\u2717 No scheme meets every demand", "class", "verdict");
-            html.open("p");
-            if (point.schemes().isEmpty()) {
-                html.text(Fields.text(point.node(), "verdict").orElse("No scheme was tried."));
-            } else {
-                writeClosest(point.schemes().get(0));
-            }
+            html.text(Fields.text(point.node(), "verdict").orElse("No scheme was tried."));
         }
-        html.close().closeLine();
+        html.close();
+        spokenOf.ifPresent(this::writeInFull);
+        html.closeLine();
     }
 
     private void writeWinner(SchemeEntry winner) {
         writeScheme(winner);
-        html.text(" comes closest to the limits and meets every demand");
+        html.text(" ranks first of the schemes that meet every demand");
         writeNeed(winner);
         OptionalDouble margin = winner.number("marginDb");
         if (margin.isPresent()) {
@@ -84,12 +88,22 @@ final class AnswerSection {
 
     private void writeScheme(SchemeEntry scheme) {
         html.open("strong").designator(scheme.code()).close();
-        html.text(" decoded by ").designator(scheme.decoder());
+        html.text(" decoded by ").designator(scheme.decoderName());
         html.text(" over ").designator(scheme.modulation());
+        html.text(scheme.quantised() ? ", quantised," : "");
+    }
+
+    /** The settings that the sentences leave out. */
+    private void writeInFull(SchemeEntry scheme) {
         String rest = scheme.channelAndQuantiser();
-        if (!rest.isEmpty()) {
-            html.text(" (" + rest + ")");
+        if (scheme.decoder().equals(scheme.decoderName()) && rest.isEmpty()) {
+            return;
         }
+        html.open("p", "class", "in-full").text("In full: ").designator(scheme.decoder());
+        if (!rest.isEmpty()) {
+            html.text(" \u00b7 ").designator(rest);
+        }
+        html.close();
     }
 
     private void writeNeed(SchemeEntry scheme) {
@@ -176,17 +190,13 @@ final class AnswerSection {
         for (int i = 0; i < schemes.size(); i++) {
             SchemeEntry scheme = schemes.get(i);
             html.text(i == 0 ? "" : i == schemes.size() - 1 ? " and " : ", ");
-            html.designator(scheme.code()).text(" by ").designator(decoderName(scheme));
+            html.designator(scheme.code()).text(" by ").designator(scheme.decoderName());
             OptionalDouble needed = scheme.number("neededEbn0Db");
             if (needed.isPresent()) {
                 html.text(" (" + Quantities.decibels(needed) + "\u00a0dB"
                         + (scheme.meets() ? "" : ", fails the requirement") + ")");
             }
         }
-    }
-
-    private static String decoderName(SchemeEntry scheme) {
-        return scheme.decoder().split(":", 2)[0];
     }
 
     private static String enumerate(List<String> items) {

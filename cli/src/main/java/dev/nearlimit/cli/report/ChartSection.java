@@ -101,8 +101,7 @@ final class ChartSection {
         html.designator(scheme.code()).text(" ");
         html.element(
                 "span",
-                scheme.decoder().split(":", 2)[0] + ", " + scheme.modulation()
-                        + (scheme.hasCurve() ? "" : ", no curve"),
+                scheme.decoderName() + ", " + scheme.modulation() + (scheme.hasCurve() ? "" : ", no curve"),
                 "class",
                 "detail");
         html.close().closeLine();

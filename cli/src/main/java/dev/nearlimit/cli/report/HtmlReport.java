@@ -22,7 +22,7 @@ public final class HtmlReport {
     /** The page's own scripts, in the order in which they build on each other. */
     private static final List<String> SCRIPTS = List.of(
             "text.js",
-            "sorting.js",
+            "tables.js",
             "appearance.js",
             "chart-frame.js",
             "error-rate-chart.js",

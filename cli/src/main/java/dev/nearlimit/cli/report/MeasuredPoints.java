@@ -25,7 +25,7 @@ final class MeasuredPoints {
                 .allMatch(scheme -> scheme.node().path("points").isEmpty())) {
             return;
         }
-        html.open("details").element("summary", "Simulated points in figures");
+        html.open("details", "class", "simulated-points").element("summary", "Simulated points in figures");
         html.open("div", "class", "scroll", "tabindex", "0", "role", "region", "aria-label", "Simulated points");
         html.open("table", "class", "points").open("thead").open("tr");
         HEADINGS.forEach(heading -> html.element("th", heading, "scope", "col"));

@@ -53,6 +53,11 @@ record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
                 .toList();
     }
 
+    /** Whether more than one scheme may be the best, as far as the measurements tell. */
+    boolean hasTie() {
+        return schemes.stream().filter(SchemeEntry::tiedWithBest).count() > 1;
+    }
+
     /** The best scheme that meets every demand. */
     Optional<SchemeEntry> winner() {
         return schemes.stream().filter(SchemeEntry::meets).findFirst();
@@ -64,7 +69,7 @@ record OperatingPoint(int index, JsonNode node, List<SchemeEntry> schemes) {
      */
     Set<Integer> shownAtFirst() {
         Map<String, Integer> bestOfCode = new LinkedHashMap<>();
-        for (SchemeEntry scheme : schemes) {
+        for (SchemeEntry scheme : placed()) {
             if (scheme.hasCurve() && bestOfCode.size() < CURVES_AT_FIRST) {
                 bestOfCode.putIfAbsent(scheme.code(), scheme.index());
             }

@@ -4,7 +4,6 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
-import java.util.function.BiConsumer;
 import java.util.function.Function;
 
 /**
@@ -13,8 +12,8 @@ import java.util.function.Function;
  */
 final class RankedTable {
     private static final List<Column> COLUMNS = List.of(
-            new Column("", "#", "rank", RankedTable::order, (s, html) -> html.text(s.key())),
-            new Column("", "Scheme", "scheme", s -> s.code() + " " + s.decoder(), RankedTable::writeScheme),
+            new Column("", "#", "rank", RankedTable::order, (s, point, html) -> html.text(s.key())),
+            new Column("", "Scheme", "scheme", s -> s.code() + " " + s.decoder(), SchemeCell::write),
             new Column("", "Verdict", "verdict", s -> s.meets() ? "0" : "1", RankedTable::writeVerdict),
             new Column("", "Needed Eb/N0 [dB]", "number", s -> raw(s.number("neededEbn0Db")), RankedTable::writeNeeded),
             decibels("", "Margin [dB]", "marginDb", null),
@@ -61,14 +60,15 @@ final class RankedTable {
      * @param cell writes the cell's content
      */
     private record Column(
-            String group,
-            String heading,
-            String style,
-            Function<SchemeEntry, String> sortValue,
-            BiConsumer<SchemeEntry, Markup> cell) {}
+            String group, String heading, String style, Function<SchemeEntry, String> sortValue, Cell cell) {}
+
+    /** Writes what stands in a cell: of one scheme among those of its operating point. */
+    private interface Cell {
+        void write(SchemeEntry scheme, OperatingPoint point, Markup html);
+    }
 
     private static Column decibels(String group, String heading, String field, String methodField) {
-        return new Column(group, heading, "number", s -> raw(s.number(field)), (s, html) -> {
+        return new Column(group, heading, "number", s -> raw(s.number(field)), (s, point, html) -> {
             html.text(Quantities.decibels(s.number(field)));
             if (methodField != null && s.number(field).isPresent()) {
                 Provenance.write(html, Fields.text(s.node(), methodField).orElse(""));
@@ -76,8 +76,8 @@ final class RankedTable {
         });
     }
 
-    private static BiConsumer<SchemeEntry, Markup> quantity(String field, Function<Double, String> format) {
-        return (s, html) -> html.text(
+    private static Cell quantity(String field, Function<Double, String> format) {
+        return (s, point, html) -> html.text(
                 s.number(field).isPresent() ? format.apply(s.number(field).getAsDouble()) : Quantities.NONE);
     }
 
@@ -93,22 +93,22 @@ final class RankedTable {
                 .toList();
         html.element("p", "Press a heading to sort by it; press again to turn the order.", "class", "hint");
         html.open("div", "class", "scroll", "tabindex", "0", "role", "region", "aria-label", "Ranked schemes");
-        html.open("table", "class", "ranked sortable");
+        html.open("table", "class", "ranked sortable foldable");
         writeHeadings(columns, html);
         html.open("tbody");
         for (SchemeEntry scheme : placed) {
             html.open("tr", "class", scheme.meets() ? "meets" : "fails");
             for (Column column : columns) {
-                String tag = column.style().equals("scheme") ? "th" : "td";
+                boolean heading = column.style().equals("scheme");
                 html.open(
-                        tag,
+                        heading ? "th" : "td",
                         "class",
                         column.style(),
                         "scope",
-                        tag.equals("th") ? "row" : null,
+                        heading ? "row" : null,
                         "data-value",
                         column.sortValue().apply(scheme));
-                column.cell().accept(scheme, html);
+                column.cell().write(scheme, point, html);
                 html.close();
             }
             html.closeLine();
@@ -164,15 +164,7 @@ final class RankedTable {
         return k.isPresent() && n.isPresent() ? Double.toString(k.getAsDouble() / n.getAsDouble()) : "";
     }
 
-    private static void writeScheme(SchemeEntry scheme, Markup html) {
-        html.open("span", "class", "code").designator(scheme.code()).close();
-        html.open("span", "class", "detail").designator(scheme.decoder());
-        html.text(" \u00b7 " + scheme.modulation());
-        String rest = scheme.channelAndQuantiser();
-        html.text(rest.isEmpty() ? "" : " \u00b7 " + rest).close();
-    }
-
-    private static void writeVerdict(SchemeEntry scheme, Markup html) {
+    private static void writeVerdict(SchemeEntry scheme, OperatingPoint point, Markup html) {
         if (scheme.meets()) {
             html.element("span", "\u2713\u00a0meets", "class", "yes");
         } else {
@@ -193,7 +185,7 @@ final class RankedTable {
                     "No scheme that meets every demand is at least as good in Eb/N0, bandwidth, latency and operations and"
                             + " better in one of them.");
         }
-        if (scheme.tiedWithBest()) {
+        if (scheme.tiedWithBest() && point.hasTie()) {
             html.element(
                     "span",
                     "tied",
@@ -204,7 +196,7 @@ final class RankedTable {
         }
     }
 
-    private static void writeNeeded(SchemeEntry scheme, Markup html) {
+    private static void writeNeeded(SchemeEntry scheme, OperatingPoint point, Markup html) {
         html.text(Quantities.decibels(scheme.number("neededEbn0Db")));
         Provenance.write(html, Fields.text(scheme.node(), "neededMethod").orElse(""));
         String interval = scheme.neededInterval("\u2009\u2026\u2009");
@@ -213,7 +205,7 @@ final class RankedTable {
         }
     }
 
-    private static void writeRate(SchemeEntry scheme, Markup html) {
+    private static void writeRate(SchemeEntry scheme, OperatingPoint point, Markup html) {
         html.text(Fields.text(scheme.node(), "rate").orElse(Quantities.NONE));
         OptionalDouble codewords = scheme.number("codewordsPerPayload");
         if (codewords.isPresent() && codewords.getAsDouble() > 1) {
@@ -221,7 +213,7 @@ final class RankedTable {
         }
     }
 
-    private static void writeLatency(SchemeEntry scheme, Markup html) {
+    private static void writeLatency(SchemeEntry scheme, OperatingPoint point, Markup html) {
         JsonNode latency = scheme.node().path("latencyS");
         OptionalDouble total = Fields.number(latency, "total");
         List<String> parts = new ArrayList<>();
@@ -235,7 +227,7 @@ final class RankedTable {
                 parts.isEmpty() ? null : String.join(", ", parts));
     }
 
-    private static void writeOperations(SchemeEntry scheme, Markup html) {
+    private static void writeOperations(SchemeEntry scheme, OperatingPoint point, Markup html) {
         JsonNode operations = scheme.node().path("operationsPerBit");
         OptionalDouble total = Fields.number(operations, "total");
         List<String> parts = new ArrayList<>();
@@ -253,9 +245,15 @@ final class RankedTable {
         }
     }
 
-    private static void writeObtained(SchemeEntry scheme, Markup html) {
-        html.text(Fields.text(scheme.node(), "neededMethod").orElse(Quantities.NONE));
-        Fields.text(scheme.node(), "neededHow").ifPresent(how -> html.element("span", how, "class", "detail"));
+    private static void writeObtained(SchemeEntry scheme, OperatingPoint point, Markup html) {
+        String method = Fields.text(scheme.node(), "neededMethod").orElse(Quantities.NONE);
+        String how = Fields.text(scheme.node(), "neededHow").orElse("");
+        if (how.isEmpty()) {
+            html.text(method);
+        } else {
+            html.open("details").element("summary", method);
+            html.element("span", how, "class", "detail").close();
+        }
         OptionalDouble undetected = scheme.number("uerUpper");
         if (undetected.isPresent()) {
             html.element(

@@ -13,24 +13,23 @@ final class RejectedTable {
         }
         html.element("h3", "Why schemes were rejected");
         html.open("div", "class", "scroll", "tabindex", "0", "role", "region", "aria-label", "Rejected schemes");
-        html.open("table", "class", "rejected");
+        html.open("table", "class", "rejected foldable");
         html.open("thead").open("tr");
         for (String heading : List.of("#", "Scheme", "Demand that fails, and by how much", "Stage")) {
             html.element("th", heading, "scope", "col");
         }
         html.close().close().open("tbody");
         for (SchemeEntry scheme : rejected) {
-            writeRow(scheme, html);
+            writeRow(scheme, point, html);
         }
         html.close().close().closeLine();
     }
 
-    private static void writeRow(SchemeEntry scheme, Markup html) {
+    private static void writeRow(SchemeEntry scheme, OperatingPoint point, Markup html) {
         html.open("tr").element("td", scheme.key(), "class", "rank");
-        html.open("th", "scope", "row", "class", "scheme");
-        html.open("span", "class", "code").designator(scheme.code()).close();
-        html.open("span", "class", "detail").designator(scheme.decoder());
-        html.text(" \u00b7 " + scheme.modulation()).close().close();
+        html.open("th", "class", "scheme", "scope", "row");
+        SchemeCell.write(scheme, point, html);
+        html.close();
         html.open("td", "class", "reasons");
         List<SchemeEntry.Failure> failures = scheme.failures();
         for (SchemeEntry.Failure failure : failures) {

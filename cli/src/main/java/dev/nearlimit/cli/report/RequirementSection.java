@@ -4,6 +4,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.function.DoubleFunction;
 
 /** What the link demands, and the link budget of each operating point. */
@@ -36,19 +37,24 @@ final class RequirementSection {
     static void write(JsonNode requirement, List<OperatingPoint> points, Markup html) {
         html.open("section", "id", "requirement").element("h2", "Requirement and link budget");
         html.open("div", "class", "side-by-side");
-        writeDemands(requirement, html);
+        boolean lossesInBudget = points.stream()
+                .anyMatch(point -> !point.node().path("linkBudget").isEmpty());
+        writeDemands(
+                requirement,
+                lossesInBudget ? Set.of("name", "description", "losses") : Set.of("name", "description"),
+                html);
         for (OperatingPoint point : points) {
             writeBudget(point, points.size() > 1, html);
         }
         html.close().closeLine();
     }
 
-    private static void writeDemands(JsonNode requirement, Markup html) {
+    private static void writeDemands(JsonNode requirement, Set<String> saidElsewhere, Markup html) {
         html.open("table", "class", "facts").element("caption", "Demands");
         html.open("tbody");
         for (Map.Entry<String, JsonNode> field : requirement.properties()) {
             String value = value(field.getKey(), field.getValue());
-            if (!value.isEmpty() && !List.of("name", "description").contains(field.getKey())) {
+            if (!value.isEmpty() && !saidElsewhere.contains(field.getKey())) {
                 html.open("tr").element("th", label(field.getKey()), "scope", "row");
                 html.element("td", value).closeLine();
             }

@@ -26,6 +26,15 @@ record SchemeEntry(String key, int index, JsonNode node) {
         return Fields.text(node, "modulation").orElse("(unnamed modulation)");
     }
 
+    /** The decoder without its settings. */
+    String decoderName() {
+        return decoder().split(":", 2)[0];
+    }
+
+    boolean quantised() {
+        return Fields.text(node, "quantiser").filter(q -> !q.equals("none")).isPresent();
+    }
+
     /** The channel's input where it is not plain floating-point LLRs from white noise, else an empty text. */
     String channelAndQuantiser() {
         String channel =

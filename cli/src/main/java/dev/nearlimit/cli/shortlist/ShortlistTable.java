@@ -77,8 +77,9 @@ final class ShortlistTable {
         text.append(
                 String.format(Locale.ROOT, NUMBERS, "", "needed Eb/N0", "margin", "gain", "gap", "band", "ops/bit"));
         text.append(String.format(Locale.ROOT, NUMBERS, "", "[dB]", "[dB]", "[dB]", "[dB]", "[kHz]", "worst"));
+        boolean ties = meeting.stream().filter(SchemeResult::tiedWithBest).count() > 1;
         for (SchemeResult scheme : shown(meeting)) {
-            boolean tied = scheme.tiedWithBest() && meeting.size() > 1;
+            boolean tied = ties && scheme.tiedWithBest();
             text.append(String.format(Locale.ROOT, "%3d%s %s%n", scheme.rank(), tied ? "=" : " ", name(scheme)));
             text.append(String.format(
                     Locale.ROOT,

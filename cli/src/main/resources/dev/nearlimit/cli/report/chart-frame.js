@@ -20,6 +20,13 @@
     };
   }
 
+  /* The range of an axis in dB that holds both ends and starts, ends and ticks at multiples of a whole number. */
+  function wholeDb(low, high) {
+    const span = high - low;
+    const step = span <= 8 ? 1 : span <= 18 ? 2 : 5;
+    return { min: Math.floor(low / step) * step, max: Math.ceil(high / step) * step, interval: step };
+  }
+
   function base(p, axes, rules) {
     return {
       animation: false,
@@ -76,5 +83,7 @@
     };
   }
 
-  nearlimit.frame = { axes: axes, base: base, ruleSeries: ruleSeries, endLabel: endLabel };
+  nearlimit.frame = {
+    axes: axes, wholeDb: wholeDb, base: base, ruleSeries: ruleSeries, endLabel: endLabel
+  };
 }());

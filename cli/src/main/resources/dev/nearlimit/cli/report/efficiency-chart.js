@@ -26,15 +26,13 @@
     const rules = this.view.availableRule();
     const xs = placed.map(function (s) { return s.scheme.neededEbn0Db; })
       .concat(rules.map(function (r) { return r.x; })).concat([-1, 4]);
-    const xMin = Math.floor(Math.min.apply(null, xs) - 1);
-    const xMax = Math.ceil(Math.max.apply(null, xs) + 0.8);
+    const range = frame.wholeDb(Math.min.apply(null, xs) - 1, Math.max.apply(null, xs) + 0.8);
     const highest = Math.max.apply(null, placed.map(function (s) { return s.scheme.efficiencyBitsPerRealDimension; })
       .concat([0.9]));
-    rules.forEach(function (rule) { rule.min = xMin; rule.max = xMax; });
+    rules.forEach(function (rule) { rule.min = range.min; rule.max = range.max; });
     const axes = frame.axes(this.view.palette, "Eb/N0 [dB]", "information bits per real dimension",
       { type: "value", min: 0, max: Math.ceil(highest * 5 + 0.5) / 5 });
-    axes.x.min = xMin;
-    axes.x.max = xMax;
+    Object.assign(axes.x, range);
     const option = frame.base(this.view.palette, axes, rules);
     option.series = [];
     nearlimit.appearance.capacities.forEach(function (capacity) {
@@ -66,7 +64,8 @@
       });
     }
     series.push({
-      type: "scatter", z: 3, symbol: "path://" + this.view.marker(index), symbolSize: 13, symbolKeepAspect: true,
+      // The best scheme lies on top where several share a place.
+      type: "scatter", z: 4 - this.view.order[index] / this.view.boxes.length, symbol: "path://" + this.view.marker(index), symbolSize: 13, symbolKeepAspect: true,
       itemStyle: { color: scheme.meets ? colour : p.sheet, borderColor: colour, borderWidth: 1.8, opacity: 1 },
       data: [place],
       label: {

@@ -45,15 +45,14 @@
     const rules = this.limitRules(focus).concat(this.view.availableRule());
     const targets = this.targets(focus, rates);
     const range = this.errorRateRange(shown, rates, rules, targets);
-    rules.forEach(function (rule) { rule.min = range.xMin; rule.max = range.xMax; });
+    rules.forEach(function (rule) { rule.min = range.x.min; rule.max = range.x.max; });
     const rateNames = rates.map(function (rate) { return rate.toUpperCase(); }).join(", ");
     const axes = frame.axes(this.view.palette, "Eb/N0 [dB]", rateNames, {
       type: "log", min: range.yMin, max: 1,
       axisLabel: { color: this.view.palette.ink, fontSize: 12,
         formatter: function (v) { return text.power(Math.round(Math.log10(v))); } }
     });
-    axes.x.min = range.xMin;
-    axes.x.max = range.xMax;
+    Object.assign(axes.x, range.x);
     const option = frame.base(this.view.palette, axes, rules);
     option.series = [];
     const ends = [];
@@ -116,9 +115,7 @@
       }, this);
     }, this);
     if (xs.length === 0) { xs = [0, 10]; }
-    return {
-      xMin: Math.floor(Math.min.apply(null, xs) - 0.2), xMax: Math.ceil(Math.max.apply(null, xs) + 0.5), yMin: yMin
-    };
+    return { x: frame.wholeDb(Math.min.apply(null, xs) - 0.2, Math.max.apply(null, xs) + 0.5), yMin: yMin };
   };
 
   ErrorRateChart.prototype.addCurve = function (series, ends, index, rate, range, both) {
@@ -175,7 +172,7 @@
   ErrorRateChart.prototype.addEndLabels = function (series, ends, range) {
     const nearby = function (from, to) {
       const distance = to.place[0] - from.place[0];
-      return distance >= 0 && distance < 0.05 * (range.xMax - range.xMin)
+      return distance >= 0 && distance < 0.05 * (range.x.max - range.x.min)
         && Math.abs(Math.log10(to.place[1] / from.place[1])) < 0.5;
     };
     ends.forEach(function (end) {
@@ -216,11 +213,11 @@
       tooltip: { formatter: "uncoded transmission, BER" }
     });
     const inside = uncoded.filter(function (u) {
-      return u[0] >= range.xMin && u[0] <= range.xMax && u[1] >= range.yMin;
+      return u[0] >= range.x.min && u[0] <= range.x.max && u[1] >= range.yMin;
     });
     if (inside.length === 0) { return; }
     const last = inside[inside.length - 1];
-    const atEdge = last[0] > range.xMax - 0.2 * (range.xMax - range.xMin);
+    const atEdge = last[0] > range.x.max - 0.2 * (range.x.max - range.x.min);
     series.push(frame.endLabel(this.view.palette, last, {
       show: true, position: atEdge ? [0, -16] : "right", align: atEdge ? "right" : "left", formatter: "uncoded BER",
       color: p.soft, fontSize: 12

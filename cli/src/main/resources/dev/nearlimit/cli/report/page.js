@@ -127,11 +127,16 @@
     });
   });
   views.forEach(function (view) { widths.observe(view.container); });
+  // Paper cannot be unfolded: what stands folded in tables is printed open.
+  let unfolded = [];
   window.addEventListener("beforeprint", function () {
+    unfolded = Array.from(document.querySelectorAll("td details:not([open]), th details:not([open])"));
+    unfolded.forEach(function (details) { details.open = true; });
     drawAll(appearance.light);
     resizeAll();
   });
   window.addEventListener("afterprint", function () {
+    unfolded.forEach(function (details) { details.open = false; });
     follow();
     resizeAll();
   });

@@ -175,6 +175,7 @@ class HtmlReportBrowserTest {
 
         assertNoErrors(page);
         assertEquals(32, curves(svg("error-rates", page)).size());
+        assertTrue(page.dom().contains("aria-expanded=\"false\">show all 32</button>"), "long tables are folded");
         assertTrue(page.dom().contains("data-images=\"0\""), "a name became an image");
     }
 

@@ -11,6 +11,7 @@ import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ContainerNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import dev.nearlimit.cli.failure.InputException;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -81,13 +82,14 @@ class HtmlReportTest {
 
         assertContains(
                 "\u2713 The requirement can be met ldpc-802.11n:648,1/2+shorten=68 decoded by"
-                        + " sum-product:iterations=30,schedule=layered,early-stop=true over qpsk comes closest to the limits"
-                        + " and meets every demand: it needs Eb/N0 = 2.06 dB (95 % interval 2.02 to 2.10 dB, simulated) for"
+                        + " sum-product over qpsk ranks first of the schemes"
+                        + " that meet every demand: it needs Eb/N0 = 2.06 dB (95 % interval 2.02 to 2.10 dB, simulated) for"
                         + " a payload frame error rate of 10\u207b\u00b3 where 5.18 dB are available, which leaves 3.12 dB"
                         + " of margin. It stands 2.26 dB from the Shannon limit, 2.13 dB from the limit of its modulation"
                         + " and 0.98 dB from the limit at its length (estimated: normal approximation), and comes before"
                         + " ldpc-regular:512,3,6,7 by sum-product (2.64 dB) and bch:511,259 by bounded-distance (4.71 dB);"
-                        + " tied with it: ldpc-802.11n:648,1/2+shorten=68 by min-sum (2.11 dB).",
+                        + " its interval overlaps that of ldpc-802.11n:648,1/2+shorten=68 by min-sum (2.11 dB). In full:"
+                        + " sum-product:iterations=30,schedule=layered,early-stop=true",
                 text);
     }
 
@@ -106,15 +108,50 @@ class HtmlReportTest {
         String page = PAGE;
 
         String demands = text(table("facts", page));
-        assertContains("Bandwidth 5 kHz", demands);
+        assertContains("Occupied bandwidth, at most 5 kHz", demands);
         assertContains("Information bit rate 2.4 kbit/s", demands);
-        assertContains("Losses pointing and snow cover 0.80 dB, receiver implementation 0.42 dB", demands);
+        assertFalse(demands.contains("Losses"), "losses stand in the budget already");
         assertContains("Payload frame error rate, at most 10\u207b\u00b3", demands);
         assertFalse(demands.contains("Available Eb/N0"), "a demand that is null is not shown");
         List<String> budget = rows(table("facts budget", page));
         assertEquals(5, budget.size());
         assertContains("loss: pointing and snow cover \u22120.80", text(budget.get(2)));
         assertContains("available Eb/N0 5.18", text(budget.get(4)));
+    }
+
+    @Test
+    void showsLossesAmongTheDemandsWhereThereIsNoBudget() {
+        ObjectNode results = SampleResults.whole();
+        ((ObjectNode) results.at("/operatingPoints/0")).remove("linkBudget");
+
+        assertContains(
+                "Losses pointing and snow cover 0.80 dB, receiver implementation 0.42 dB",
+                text(table("facts", HtmlReport.render(results))));
+    }
+
+    @Test
+    void saysWhenTheRunWasCutShort() {
+        ObjectNode results = SampleResults.whole();
+        assertFalse(text(HtmlReport.render(results)).contains("interrupted"));
+
+        results.put("complete", false);
+
+        assertContains("Incomplete: the run was interrupted", text(HtmlReport.render(results)));
+    }
+
+    @Test
+    void unfoldsSettingsOnlyWhereNamesAloneDoNotTellSchemesApart() {
+        ObjectNode results = SampleResults.whole();
+        assertFalse(table("ranked", HtmlReport.render(results)).contains("<details open>"));
+        ObjectNode twin = SampleResults.scheme(results, 1).deepCopy();
+        twin.put("decoder", "min-sum:iterations=5,scale=6/8,word=6").put("rank", 9);
+        SampleResults.schemes(results).add(twin);
+
+        List<String> open = all("<details open>(.*?)</details>", table("ranked", HtmlReport.render(results)));
+
+        assertEquals(2, open.size());
+        assertContains("iterations=20", text(open.get(0)));
+        assertContains("iterations=5", text(open.get(1)));
     }
 
     @Test
@@ -182,7 +219,7 @@ class HtmlReportTest {
 
         assertEquals(5, rows.size());
         assertContains("bandwidth 5 kHz: needs 250 Hz more", text(rows.get(2)));
-        assertContains("d1", text(rows.get(3)));
+        assertContains("f4", text(rows.get(3)));
         assertContains("dropped after 32 frame errors at 5.18 dB: FER above 0.02 (95 %)", text(rows.get(3)));
         assertContains("screened", text(rows.get(4)));
     }
@@ -395,9 +432,10 @@ class HtmlReportTest {
         Path target = Files.createDirectory(folder.resolve("report.html"));
         Files.writeString(target.resolve("kept.txt"), "kept");
 
-        assertThrows(IOException.class, () -> HtmlReport.write(SampleResults.whole(), target));
+        assertThrows(InputException.class, () -> HtmlReport.write(SampleResults.whole(), target));
         assertThrows(
-                IOException.class, () -> HtmlReport.write(SampleResults.whole(), folder.resolve("absent/report.html")));
+                InputException.class,
+                () -> HtmlReport.write(SampleResults.whole(), folder.resolve("absent/report.html")));
 
         assertEquals("kept", Files.readString(target.resolve("kept.txt")));
         try (Stream<Path> files = Files.list(folder)) {

@@ -14,17 +14,12 @@ import dev.nearlimit.shortlist.requirement.Link;
  * @param airS time from the payload's first symbol to its last [s]
  */
 record Carriage(
-        Modulation modulation,
-        long symbolsPerPayload,
-        double symbolRateBaud,
-        double occupiedBandwidthHz,
-        double airS) {
+        Modulation modulation, long symbolsPerPayload, double symbolRateBaud, double occupiedBandwidthHz, double airS) {
 
     static Carriage of(PayloadFit fit, Modulation modulation, Link link) {
         long symbols = Math.multiplyExact(
                 (long) fit.codewords(), modulation.symbolsFor(fit.code().n()));
         double symbolRate = link.bitRateBps() * symbols / fit.payloadBits();
-        return new Carriage(
-                modulation, symbols, symbolRate, symbolRate * (1 + link.rollOff()), symbols / symbolRate);
+        return new Carriage(modulation, symbols, symbolRate, symbolRate * (1 + link.rollOff()), symbols / symbolRate);
     }
 }

@@ -14,10 +14,10 @@ import java.util.function.BooleanSupplier;
 
 /**
  * Spends simulation where the answer needs it. Contenders with an exact error rate cost nothing. Of the others, those
- * that fail bandwidth, latency or budget, or whose limit lies above the available Eb/N0, are dropped unsimulated; a trial
- * of a few dozen frame errors at the available Eb/N0 drops those that miss it; the rest are bracketed coarsely; and only
- * those whose interval reaches the best one's are refined. If nothing meets the requirement, everything is bracketed, so
- * that the answer can say what comes closest.
+ * that fail bandwidth, latency or budget, or whose limit lies above the available Eb/N0, are dropped unsimulated; the
+ * rest are bracketed coarsely, climbing no higher than the available Eb/N0, where a few dozen frame errors drop those
+ * that miss it; and only those whose interval reaches the best one's are refined. If nothing meets the requirement,
+ * everything is bracketed further, so that the answer can say what comes closest.
  *
  * <p>Contenders are taken in their given order and decisions depend on counts alone, so that the same seed gives the same
  * shortlist.
@@ -29,6 +29,9 @@ final class Contest {
     /** Work of a refinement against a coarse step, for the same estimate. */
     private static final double REFINEMENT_WORK = 3;
 
+    /** How far beyond the available Eb/N0 a contender is followed that may just miss it [dB]. */
+    private static final double BEYOND_REACH_DB = 0.5;
+
     private final List<Standing> standings;
     private final Demands demands;
     private final ShortlistObserver observer;
@@ -37,8 +40,7 @@ final class Contest {
     private double workExpected;
     private double fractionShown;
 
-    Contest(
-            List<Standing> standings, Demands demands, ShortlistObserver observer, BooleanSupplier cancelled) {
+    Contest(List<Standing> standings, Demands demands, ShortlistObserver observer, BooleanSupplier cancelled) {
         this.standings = standings;
         this.demands = demands;
         this.observer = observer;
@@ -52,25 +54,13 @@ final class Contest {
                 open.add(standing);
             }
         }
-        workExpected = 2.0 * open.size() + REFINEMENT_WORK * EXPECTED_REFINEMENTS;
-        List<Standing> survivors = new ArrayList<>();
+        workExpected = open.size() + REFINEMENT_WORK * EXPECTED_REFINEMENTS;
         for (Standing standing : open) {
             if (cancelled.getAsBoolean()) {
                 break;
             }
-            step("trying " + standing.contender().describe(), 1);
-            if (passesTrial(standing)) {
-                survivors.add(standing);
-            } else {
-                workExpected -= 1;
-            }
-        }
-        for (Standing standing : survivors) {
-            if (cancelled.getAsBoolean()) {
-                break;
-            }
             step("bracketing " + standing.contender().describe(), 1);
-            bracket(standing);
+            bracketWithinReach(standing);
         }
         if (winners().isEmpty()) {
             lookForTheClosest();
@@ -92,7 +82,8 @@ final class Contest {
             standing.setCurve(
                     inTheRunning
                             ? standing.search().exact(exact.get())
-                            : CurveSearch.unmeasured(exact.get(), contender.fit().codewordFerTarget()));
+                            : CurveSearch.unmeasured(
+                                    exact.get(), contender.fit().codewordFerTarget()));
             if (!inTheRunning) {
                 standing.drop("needed Eb/N0 from the exact error rate; nothing simulated");
             }
@@ -112,22 +103,26 @@ final class Contest {
         return false;
     }
 
-    private boolean passesTrial(Standing standing) {
-        CurveSearch.Trial trial = standing.search()
-                .trial(demands.leftDb() - standing.contender().fit().fillerDb());
-        standing.setTrial(trial);
-        if (trial.above()) {
+    /** Brackets up to the available Eb/N0; a little beyond, if a few dozen errors there cannot tell. */
+    private void bracketWithinReach(Standing standing) {
+        double reachDb = demands.leftDb() - standing.contender().fit().fillerDb();
+        bracket(standing, reachDb);
+        if (!standing.curve().complete()) {
+            return;
+        }
+        if (!standing.curve().found() && !standing.search().missesForSure(standing.curve())) {
+            bracket(standing, reachDb + BEYOND_REACH_DB);
+        }
+        if (standing.curve().complete() && !standing.curve().found()) {
             standing.drop(String.format(
                     Locale.ROOT,
                     "dropped after %d frame errors at the available Eb/N0",
-                    trial.point().counts().frameErrors()));
+                    standing.curve().nearNeeded().counts().frameErrors()));
         }
-        return !trial.above();
     }
 
-    private void bracket(Standing standing) {
-        Contender contender = standing.contender();
-        standing.setCurve(standing.search().coarse(startDb(contender), giveUpDb(contender)));
+    private static void bracket(Standing standing, double giveUpDb) {
+        standing.setCurve(standing.search().coarse(startDb(standing.contender()), giveUpDb));
     }
 
     /** A little below what the best codes of this length need, where errors are plentiful. */
@@ -181,15 +176,20 @@ final class Contest {
     }
 
     private void lookForTheClosest() {
-        List<Standing> unknown =
-                standings.stream().filter(standing -> standing.curve() == null).toList();
+        List<Standing> unknown = standings.stream()
+                .filter(standing ->
+                        standing.curve() == null || !standing.curve().found())
+                .toList();
         workExpected = workDone + unknown.size();
         for (Standing standing : unknown) {
             if (cancelled.getAsBoolean()) {
                 return;
             }
-            step("nothing meets the requirement yet; bracketing " + standing.contender().describe(), 1);
-            bracket(standing);
+            step(
+                    "nothing meets the requirement yet; bracketing "
+                            + standing.contender().describe(),
+                    1);
+            bracket(standing, giveUpDb(standing.contender()));
         }
     }
 
@@ -206,8 +206,6 @@ final class Contest {
     /** Whether every curve that was begun is complete. */
     boolean complete() {
         return !cancelled.getAsBoolean()
-                && standings.stream()
-                        .map(Standing::curve)
-                        .allMatch(curve -> curve == null || curve.complete());
+                && standings.stream().map(Standing::curve).allMatch(curve -> curve == null || curve.complete());
     }
 }

@@ -2,6 +2,7 @@ package dev.nearlimit.shortlist;
 
 import dev.nearlimit.shortlist.requirement.Requirement;
 import dev.nearlimit.shortlist.result.SchemeResult.Failure;
+import dev.nearlimit.simulation.search.MeasuredPoint;
 import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
 import java.util.ArrayList;
 import java.util.List;
@@ -81,29 +82,30 @@ final class Demands {
         double limit = standing.contender().ownLimitDb();
         if (!Double.isNaN(needed)) {
             if (needed > leftDb) {
-                failures.add(new Failure(demand, String.format(Locale.ROOT, "needs %.2f dB more", needed - leftDb)));
+                failures.add(new Failure(demand, "needs " + Units.decibels(needed - leftDb) + " more"));
             }
         } else if (limit > leftDb) {
             failures.add(new Failure(
                     demand,
                     String.format(
                             Locale.ROOT,
-                            "the limit at its rate alone, %.2f dB, needs %.2f dB more",
+                            "the limit at its rate alone, %.2f dB, needs %s more",
                             limit,
-                            limit - leftDb)));
-        } else if (standing.trial() != null && standing.failedTrial()) {
-            double low = new ErrorRateIntervals().frameErrorRate(standing.trial().counts(), standing.trial().rule())
+                            Units.decibels(limit - leftDb))));
+        } else if (standing.curve() != null && standing.curve().nearNeeded() != null) {
+            MeasuredPoint last = standing.curve().nearNeeded();
+            double low = new ErrorRateIntervals()
+                    .frameErrorRate(last.counts(), last.rule())
                     .low();
             failures.add(new Failure(
                     demand,
                     String.format(
                             Locale.ROOT,
-                            "codeword FER above %.1e after %d frame errors there, %.1e allowed",
+                            "codeword FER above %.1e at %.2f dB after %d frame errors, %.1e allowed",
                             low,
-                            standing.trial().counts().frameErrors(),
+                            last.ebn0Db() + standing.contender().fit().fillerDb(),
+                            last.counts().frameErrors(),
                             standing.contender().fit().codewordFerTarget())));
-        } else if (standing.curve() != null && !standing.curve().found()) {
-            failures.add(new Failure(demand, standing.curve().how()));
         }
     }
 

@@ -13,12 +13,10 @@ final class LinkBudget {
     static List<BudgetLine> lines(Link link) {
         List<BudgetLine> lines = new ArrayList<>();
         if (link.cOverN0DbHz().isPresent()) {
-            lines.add(new BudgetLine(
-                    "received C/N0 [dBHz]", link.cOverN0DbHz().getAsDouble()));
+            lines.add(new BudgetLine("received C/N0 [dBHz]", link.cOverN0DbHz().getAsDouble()));
             lines.add(new BudgetLine("information bit rate", -10 * Math.log10(link.bitRateBps())));
         } else {
-            lines.add(new BudgetLine(
-                    "received Eb/N0", link.availableEbn0Db().getAsDouble()));
+            lines.add(new BudgetLine("received Eb/N0", link.availableEbn0Db().getAsDouble()));
         }
         for (Loss loss : link.losses()) {
             lines.add(new BudgetLine("loss: " + loss.name(), loss.db() == 0 ? 0 : -loss.db()));

@@ -4,6 +4,7 @@ import dev.nearlimit.codes.KnownDistance;
 import dev.nearlimit.decoders.DecoderSettings;
 import dev.nearlimit.decoders.OperationCount;
 import dev.nearlimit.limits.UncodedBinary;
+import dev.nearlimit.shortlist.evaluation.BitErrorRate;
 import dev.nearlimit.shortlist.evaluation.ErrorCurve;
 import dev.nearlimit.shortlist.evaluation.ExactErrorRate;
 import dev.nearlimit.shortlist.evaluation.PayloadFit;
@@ -19,7 +20,6 @@ import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
 import dev.nearlimit.simulation.statistics.Interval;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.TreeMap;
 
 /** Writes down what is known of a contender carried by one modulation: the row of the shortlist, before it is ranked. */
 final class SchemeAssembler {
@@ -41,9 +41,7 @@ final class SchemeAssembler {
         ErrorCurve curve = standing.curve();
         List<Failure> failures = demands.failures(standing, carriage);
         Double needed = known(standing.neededDb());
-        Double ber = curve == null ? null : known(curve.berAtNeeded());
-        Double codingGain =
-                needed == null || ber == null ? null : UncodedBinary.ebn0DbForBitErrorRate(ber) - needed;
+        BitErrorRate ber = curve == null || needed == null ? null : curve.berAtNeeded();
         Double iterations = averageIterations(standing, decoder);
         return new SchemeResult(
                 null,
@@ -65,9 +63,11 @@ final class SchemeAssembler {
                 needed == null ? "none" : curve.method(),
                 curve == null ? "" : curve.how(),
                 needed == null ? null : demands.leftDb() - needed,
-                codingGain,
-                codingGain == null ? "none" : "simulated",
-                ber,
+                ber == null ? null : codingGainDb(ber.value(), needed),
+                ber == null ? null : codingGainDb(ber.interval().high(), needed),
+                ber == null ? null : codingGainDb(ber.interval().low(), needed),
+                ber == null ? "none" : "simulated",
+                ber == null ? null : ber.value(),
                 gap(needed, contender.limits().shannonDb()),
                 gap(needed, contender.limits().modulationDb()),
                 decoder.hardDecision() ? gap(needed, contender.limits().hardDecisionDb()) : null,
@@ -98,6 +98,11 @@ final class SchemeAssembler {
         return marginUncertain ? "its interval reaches beyond the available Eb/N0" : standing.note();
     }
 
+    /** Null where the BER is so uncertain that it tells nothing: 0, or one half and more. */
+    private static Double codingGainDb(double ber, double neededDb) {
+        return ber > 0 && ber < 0.5 ? UncodedBinary.ebn0DbForBitErrorRate(ber) - neededDb : null;
+    }
+
     private static Double averageIterations(Standing standing, DecoderSettings decoder) {
         MeasuredPoint near = standing.curve() == null ? null : standing.curve().nearNeeded();
         if (decoder.maxIterations() == 0 || near == null) {
@@ -123,17 +128,11 @@ final class SchemeAssembler {
     }
 
     private static List<Point> points(Standing standing) {
-        TreeMap<Long, MeasuredPoint> all = new TreeMap<>();
-        if (standing.trial() != null) {
-            all.put(standing.trial().microDb(), standing.trial());
-        }
-        if (standing.curve() != null) {
-            for (MeasuredPoint point : standing.curve().points()) {
-                all.put(point.microDb(), point);
-            }
+        if (standing.curve() == null) {
+            return List.of();
         }
         List<Point> points = new ArrayList<>();
-        for (MeasuredPoint point : all.values()) {
+        for (MeasuredPoint point : standing.curve().points()) {
             points.add(point(standing.contender(), point));
         }
         return points;
@@ -162,7 +161,8 @@ final class SchemeAssembler {
 
     /** The exact FER from well above to well below the target, for drawing. */
     private static List<ExactPoint> exactCurve(Standing standing) {
-        ExactErrorRate exact = standing.curve() == null ? null : standing.curve().exact();
+        ExactErrorRate exact =
+                standing.curve() == null ? null : standing.curve().exact();
         if (exact == null) {
             return null;
         }

@@ -81,8 +81,7 @@ public final class Shortlister {
         List<Ranking.Row> rows = new ArrayList<>();
         for (Standing standing : standings) {
             for (Carriage carriage : standing.carriages()) {
-                rows.add(new Ranking.Row(
-                        assembler.assemble(standing, carriage), demands.missDb(standing, carriage)));
+                rows.add(new Ranking.Row(assembler.assemble(standing, carriage), demands.missDb(standing, carriage)));
             }
         }
         return Ranking.rank(rows);

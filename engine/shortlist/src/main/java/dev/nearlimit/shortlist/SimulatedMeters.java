@@ -50,8 +50,7 @@ public final class SimulatedMeters implements MeterFactory {
                 contender.choice().quantiser(),
                 new Channel.Awgn());
         return (microDb, rule) -> {
-            PointCounts counts =
-                    simulator.run(scheme, new Point(OptionalLong.of(microDb)), seed, rule, control);
+            PointCounts counts = simulator.run(scheme, new Point(OptionalLong.of(microDb)), seed, rule, control);
             framesSimulated.addAndGet(counts.frames());
             return counts;
         };

@@ -2,7 +2,6 @@ package dev.nearlimit.shortlist;
 
 import dev.nearlimit.shortlist.evaluation.CurveSearch;
 import dev.nearlimit.shortlist.evaluation.ErrorCurve;
-import dev.nearlimit.simulation.search.MeasuredPoint;
 import java.util.List;
 
 /**
@@ -14,8 +13,6 @@ final class Standing {
     private final List<Carriage> carriages;
     private final CurveSearch search;
     private ErrorCurve curve;
-    private MeasuredPoint trial;
-    private boolean failedTrial;
     private String note = "";
 
     Standing(Contender contender, List<Carriage> carriages, CurveSearch search) {
@@ -46,21 +43,6 @@ final class Standing {
         this.curve = curve;
     }
 
-    /** The trial at the available Eb/N0; null if there was none. */
-    MeasuredPoint trial() {
-        return trial;
-    }
-
-    /** Whether the trial showed an FER above the target. */
-    boolean failedTrial() {
-        return failedTrial;
-    }
-
-    void setTrial(CurveSearch.Trial shown) {
-        this.trial = shown.point();
-        this.failedTrial = shown.above();
-    }
-
     String note() {
         return note;
     }
@@ -71,14 +53,20 @@ final class Standing {
 
     /** Needed Eb/N0 per payload bit [dB], filler charged; NaN where it is not known. */
     double neededDb() {
-        return curve == null || !curve.found() ? Double.NaN : curve.neededDb() + contender.fit().fillerDb();
+        return curve == null || !curve.found()
+                ? Double.NaN
+                : curve.neededDb() + contender.fit().fillerDb();
     }
 
     double neededLowDb() {
-        return curve == null ? Double.NaN : curve.neededLowDb() + contender.fit().fillerDb();
+        return curve == null
+                ? Double.NaN
+                : curve.neededLowDb() + contender.fit().fillerDb();
     }
 
     double neededHighDb() {
-        return curve == null ? Double.NaN : curve.neededHighDb() + contender.fit().fillerDb();
+        return curve == null
+                ? Double.NaN
+                : curve.neededHighDb() + contender.fit().fillerDb();
     }
 }

@@ -17,6 +17,11 @@ final class Units {
         return s >= 1e-3 ? digits(s * 1e3) + " ms" : digits(s * 1e6) + " us";
     }
 
+    /** Hundredths of a decibel; a positive difference never looks like none. */
+    static String decibels(double db) {
+        return db < 0.005 ? "less than 0.01 dB" : String.format(Locale.ROOT, "%.2f dB", db);
+    }
+
     static String operations(double count) {
         return digits(count) + " operations a bit";
     }

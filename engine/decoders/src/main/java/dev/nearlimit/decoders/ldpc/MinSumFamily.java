@@ -20,8 +20,11 @@ import java.util.Optional;
  * with scale=6/8; 0.098 with word=6, 0.25 with word=5, 0.93 with word=4; 0.0007 with word=5,offset=1, as sum-product.
  */
 public final class MinSumFamily implements DecoderFamily {
-    /** Common practice for normalised min-sum on codes with row weights of 6 to 8. */
+    /** In floating point; common practice for normalised min-sum on codes with row weights of 6 to 8. */
     private static final MagnitudeCorrection STANDARD = new MagnitudeCorrection.Scale(6);
+
+    /** In fixed point, where a scale's rounding down would cut small messages most. */
+    private static final MagnitudeCorrection FIXED_POINT_STANDARD = new MagnitudeCorrection.Offset(1);
 
     @Override
     public String name() {
@@ -36,8 +39,9 @@ public final class MinSumFamily implements DecoderFamily {
     @Override
     public List<SettingHelp> settings() {
         List<SettingHelp> all = new ArrayList<>(Iterations.settings());
-        all.add(new SettingHelp("scale", "1/8..8/8", STANDARD.designator(), "factor on check messages"));
-        all.add(new SettingHelp("offset", "number", "none", "taken off check messages [LLR units; levels with word=]"));
+        all.add(new SettingHelp("scale", "1/8..8/8", "6/8; none with word=", "factor on check messages"));
+        all.add(new SettingHelp(
+                "offset", "number", "none; 1 with word=", "taken off check messages [LLR units; levels with word=]"));
         all.add(new SettingHelp("message-word", "2..8", "bits of a level", "bits of a message; needs word="));
         all.add(new SettingHelp("posterior-word", "..15", "message-word + 2", "bits of a posterior; needs word="));
         return all;
@@ -57,7 +61,7 @@ public final class MinSumFamily implements DecoderFamily {
         Optional<Float> offset = reader.number("offset", 0, MagnitudeCorrection.Offset.LARGEST);
         MagnitudeCorrection correction = scale.<MagnitudeCorrection>map(MagnitudeCorrection.Scale::new)
                 .or(() -> offset.map(MagnitudeCorrection.Offset::new))
-                .orElse(STANDARD);
+                .orElse(fixedPoint ? FIXED_POINT_STANDARD : STANDARD);
         return new MinSumSettings(
                 iterations, correction, fixedPoint ? Optional.of(words(reader, quantiser)) : none(reader));
     }

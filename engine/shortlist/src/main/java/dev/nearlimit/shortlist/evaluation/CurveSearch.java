@@ -7,18 +7,17 @@ import dev.nearlimit.simulation.search.MeasuredPoint;
 import dev.nearlimit.simulation.search.NeededEbn0;
 import dev.nearlimit.simulation.search.NeededEbn0Search;
 import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
-import dev.nearlimit.simulation.statistics.Interval;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
-import java.util.stream.Stream;
 
 /**
- * Finds one contender's error curve in steps that a shortlist may stop after: a trial at the available Eb/N0, a coarse
- * bracket, a refined one. Points measured in one step serve the next.
+ * Finds one contender's error curve in steps that a shortlist may stop after: a coarse bracket, a refined one.
+ * Points measured in one step serve the next.
  */
 public final class CurveSearch {
-    /** Frame errors that end a point of the trial and of the coarse bracket: a few dozen. */
+    /** Frame errors that end a point of the coarse bracket: a few dozen. */
     public static final long COARSE_ERRORS = 32;
 
     /** Frame errors that end a point of the refined bracket. */
@@ -45,22 +44,6 @@ public final class CurveSearch {
     }
 
     /**
-     * What a trial at one Eb/N0 showed.
-     *
-     * @param point the counts
-     * @param fer 95 % interval of the FER
-     * @param above whether that interval lies above the target
-     */
-    public record Trial(MeasuredPoint point, Interval fer, boolean above) {}
-
-    /** Tries the contender at one Eb/N0 with a few dozen frame errors. */
-    public Trial trial(double ebn0Db) {
-        MeasuredPoint point = measure(ebn0Db, COARSE_ERRORS);
-        Interval fer = new ErrorRateIntervals().frameErrorRate(point.counts(), point.rule());
-        return new Trial(point, fer, fer.low() > targetFer);
-    }
-
-    /**
      * Brackets the needed Eb/N0 between points at most 0.25 dB apart.
      *
      * @param startDb where to begin [dB]
@@ -68,6 +51,18 @@ public final class CurveSearch {
      */
     public ErrorCurve coarse(double startDb, double giveUpDb) {
         return simulated(search.bracket(startDb, giveUpDb, COARSE_ERRORS), "coarse");
+    }
+
+    /**
+     * Whether a curve that gave up has shown that the target is missed where it ended: its FER interval there (95 %) lies
+     * above the target.
+     */
+    public boolean missesForSure(ErrorCurve gaveUp) {
+        MeasuredPoint last = gaveUp.nearNeeded();
+        return new ErrorRateIntervals()
+                        .frameErrorRate(last.counts(), last.rule())
+                        .low()
+                > targetFer;
     }
 
     /** Narrows what {@link #coarse} found. */
@@ -82,6 +77,9 @@ public final class CurveSearch {
     public ErrorCurve exact(ExactErrorRate rate) {
         double needed = rate.neededEbn0Db(targetFer);
         MeasuredPoint point = measure(needed, 2 * COARSE_ERRORS);
+        if (point.counts().frames() == 0) {
+            return withoutMeasurement(rate, targetFer, false);
+        }
         return new ErrorCurve(
                 needed,
                 needed,
@@ -92,21 +90,24 @@ public final class CurveSearch {
                 List.of(point),
                 rate,
                 point,
-                bitErrorRate(point, null),
+                bitErrorRate(point),
                 point.counts().complete());
     }
 
     /** The same curve for a contender out of the running: what the formula gives, and nothing measured. */
     public static ErrorCurve unmeasured(ExactErrorRate rate, double targetFer) {
+        return withoutMeasurement(rate, targetFer, true);
+    }
+
+    private static ErrorCurve withoutMeasurement(ExactErrorRate rate, double targetFer, boolean complete) {
         double needed = rate.neededEbn0Db(targetFer);
         return new ErrorCurve(
-                needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, Double.NaN, true);
+                needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, null, complete);
     }
 
     private MeasuredPoint measure(double ebn0Db, long errors) {
         long microDb = Math.round(ebn0Db * 1e6);
-        StoppingRule rule =
-                new StoppingRule((long) Math.min(MOST_FRAMES, Math.ceil(errors / targetFer)), errors);
+        StoppingRule rule = new StoppingRule((long) Math.min(MOST_FRAMES, Math.ceil(errors / targetFer)), errors);
         PointCounts counts = meter.measure(microDb, rule);
         return new MeasuredPoint(microDb, counts, rule);
     }
@@ -127,18 +128,10 @@ public final class CurveSearch {
                 found.complete());
     }
 
-    /**
-     * Information-bit error rate where the FER is the target: target times wrong bits a failed frame, which hardly
-     * changes over a bracket and is therefore taken from both of its ends together.
-     */
-    private double bitErrorRate(MeasuredPoint first, MeasuredPoint second) {
-        long bits = 0;
-        long frames = 0;
-        for (MeasuredPoint point : Stream.of(first, second).filter(Objects::nonNull).toList()) {
-            bits += point.counts().bitErrors();
-            frames += point.counts().frameErrors();
-        }
-        return bits == 0 ? Double.NaN : targetFer * bits / ((double) frames * informationBits);
+    private BitErrorRate bitErrorRate(MeasuredPoint... points) {
+        List<MeasuredPoint> measured =
+                Arrays.stream(points).filter(Objects::nonNull).toList();
+        return BitErrorRate.at(targetFer, measured, informationBits).orElse(null);
     }
 
     private static String describe(NeededEbn0 found) {

@@ -16,7 +16,7 @@ import java.util.List;
  * @param points simulated points
  * @param exact exact FER at an Eb/N0, null where no formula is known
  * @param nearNeeded the simulated point that stands for behaviour at the needed Eb/N0, null if there is none
- * @param berAtNeeded information-bit error rate at the needed Eb/N0, NaN where unknown
+ * @param berAtNeeded information-bit error rate at the needed Eb/N0, null where unknown
  * @param complete false if the search was interrupted
  */
 public record ErrorCurve(
@@ -29,7 +29,7 @@ public record ErrorCurve(
         List<MeasuredPoint> points,
         ExactErrorRate exact,
         MeasuredPoint nearNeeded,
-        double berAtNeeded,
+        BitErrorRate berAtNeeded,
         boolean complete) {
     public ErrorCurve {
         points = List.copyOf(points);

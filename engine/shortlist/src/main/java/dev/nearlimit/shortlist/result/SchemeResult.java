@@ -26,6 +26,8 @@ import java.util.List;
  * @param neededHow how it was found, in words
  * @param marginDb available minus needed Eb/N0 [dB]
  * @param codingGainDb Eb/N0 that uncoded transmission needs at the same BER, minus the scheme's [dB]
+ * @param codingGainDbLow lower end of what the 95 % interval of the BER leaves of it
+ * @param codingGainDbHigh upper end
  * @param codingGainMethod how: simulated or none
  * @param berAtNeeded information-bit error rate at the needed Eb/N0
  * @param gapToShannonDb needed Eb/N0 minus the Shannon limit at the payload's rate [dB]
@@ -74,6 +76,8 @@ public record SchemeResult(
         String neededHow,
         Double marginDb,
         Double codingGainDb,
+        Double codingGainDbLow,
+        Double codingGainDbHigh,
         String codingGainMethod,
         Double berAtNeeded,
         Double gapToShannonDb,
@@ -128,6 +132,8 @@ public record SchemeResult(
                 neededHow,
                 marginDb,
                 codingGainDb,
+                codingGainDbLow,
+                codingGainDbHigh,
                 codingGainMethod,
                 berAtNeeded,
                 gapToShannonDb,
@@ -163,8 +169,7 @@ public record SchemeResult(
      * @param hardDecisionDb hard decisions
      * @param normalApproximationDb normal approximation for the whole payload; null where it does not exist
      */
-    public record Limits(
-            double shannonDb, double modulationDb, double hardDecisionDb, Double normalApproximationDb) {}
+    public record Limits(double shannonDb, double modulationDb, double hardDecisionDb, Double normalApproximationDb) {}
 
     /**
      * Latency [s]; parts that nothing is known about are null.

@@ -10,8 +10,7 @@ import java.util.List;
  * @param complete false if the run was interrupted
  * @param framesSimulated codewords sent through the simulated channel
  */
-public record ShortlistResult(
-        long seed, List<OperatingPoint> operatingPoints, boolean complete, long framesSimulated) {
+public record ShortlistResult(long seed, List<OperatingPoint> operatingPoints, boolean complete, long framesSimulated) {
     public ShortlistResult {
         operatingPoints = List.copyOf(operatingPoints);
     }

@@ -50,7 +50,7 @@ public final class NeededEbn0Search {
     }
 
     /**
-     * Brackets the target.
+     * Brackets the target. Called again with a higher {@code giveUpDb}, it goes on where it gave up.
      *
      * @param startDb where to begin [dB]; best a little below the answer
      * @param giveUpDb highest Eb/N0 to try [dB]
@@ -58,7 +58,7 @@ public final class NeededEbn0Search {
      */
     public NeededEbn0 bracket(double startDb, double giveUpDb, long errors) {
         long floor = onGrid(startDb - 6, BRACKET_GRID_MICRO_DB);
-        long ceiling = onGrid(giveUpDb, BRACKET_GRID_MICRO_DB);
+        long ceiling = Math.round(giveUpDb * 1e6);
         long at = Math.min(onGrid(startDb, BRACKET_GRID_MICRO_DB), ceiling);
         MeasuredPoint point = measure(at, errors);
         while (!cutShort && point.fer() <= targetFer && at > floor) {
@@ -139,8 +139,8 @@ public final class NeededEbn0Search {
         if (earlier == null || earlier.getValue().fer() <= last.fer()) {
             return 2 * BRACKET_GRID_MICRO_DB;
         }
-        double slope = (Math.log10(last.fer()) - Math.log10(earlier.getValue().fer()))
-                / (last.microDb() - earlier.getKey());
+        double slope =
+                (Math.log10(last.fer()) - Math.log10(earlier.getValue().fer())) / (last.microDb() - earlier.getKey());
         double wanted = (Math.log10(targetFer) - Math.log10(last.fer())) / slope;
         long steps = (long) Math.ceil(wanted / BRACKET_GRID_MICRO_DB);
         return BRACKET_GRID_MICRO_DB * Math.max(1, Math.min(4, steps));

@@ -73,15 +73,13 @@ class NeededEbn0SearchTest {
                 "seed " + seed + ": " + coarse + " then " + refined);
         assertEquals(3.0, refined.ebn0Db(), 0.06, "seed " + seed);
         assertEquals(
-                200_000,
-                refined.bracketHigh().microDb() - refined.bracketLow().microDb(),
-                "seed " + seed);
+                200_000, refined.bracketHigh().microDb() - refined.bracketLow().microDb(), "seed " + seed);
     }
 
     @Test
     void startsAboveTheAnswerAndComesDown() {
-        NeededEbn0 found = new NeededEbn0Search(new KnownRate(db -> Math.pow(10, -db), 7), 1e-2, 1_000_000)
-                .bracket(6.0, 12, 32);
+        NeededEbn0 found =
+                new NeededEbn0Search(new KnownRate(db -> Math.pow(10, -db), 7), 1e-2, 1_000_000).bracket(6.0, 12, 32);
         assertTrue(found.bracketed());
         assertTrue(found.lowDb() < 2.0 && found.highDb() > 2.0, found.toString());
     }

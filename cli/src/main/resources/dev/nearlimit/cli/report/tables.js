@@ -1,4 +1,4 @@
-// Tables: sort by the button in a heading.
+// Tables: sort by the button in a heading, and fold long ones after a dozen rows.
 (function () {
   "use strict";
 
@@ -37,5 +37,23 @@
     table.querySelectorAll("th[aria-sort] button").forEach(function (button) {
       button.addEventListener("click", function () { sortTable(table, button.closest("th")); });
     });
+  });
+
+  const UNFOLDED_ROWS = 12;
+
+  document.querySelectorAll("table.foldable").forEach(function (table) {
+    const rows = table.tBodies[0].rows.length;
+    if (rows <= UNFOLDED_ROWS) { return; }
+    const button = document.createElement("button");
+    button.type = "button";
+    button.className = "unfold";
+    const fold = function (folded) {
+      table.classList.toggle("folded", folded);
+      button.textContent = folded ? "show all " + rows : "show the first " + UNFOLDED_ROWS;
+      button.setAttribute("aria-expanded", String(!folded));
+    };
+    button.addEventListener("click", function () { fold(!table.classList.contains("folded")); });
+    fold(true);
+    table.parentNode.insertAdjacentElement("afterend", button);
   });
 }());
