@@ -167,12 +167,7 @@ final class ShortlistTable {
     }
 
     private static String codeAndDecoder(SchemeResult scheme) {
-        return scheme.code() + ", " + decoder(scheme);
-    }
-
-    private static String decoder(SchemeResult scheme) {
-        String family = scheme.decoder().split(":", 2)[0];
-        return scheme.quantiser().equals("none") ? family : family + " (fixed point)";
+        return scheme.code() + ", " + scheme.shortDecoder();
     }
 
     private void paragraph(String words) {
