@@ -101,11 +101,11 @@ final class Demands {
                     demand,
                     String.format(
                             Locale.ROOT,
-                            "codeword FER above %.1e at %.2f dB after %d frame errors, %.1e allowed",
-                            low,
+                            "codeword FER above %s at %.2f dB after %d frame errors, %s allowed",
+                            Units.errorRate(low),
                             last.ebn0Db() + standing.contender().fit().fillerDb(),
                             last.counts().frameErrors(),
-                            standing.contender().fit().codewordFerTarget())));
+                            Units.errorRate(standing.contender().fit().codewordFerTarget()))));
         }
     }
 

@@ -22,6 +22,11 @@ final class Units {
         return db < 0.005 ? "less than 0.01 dB" : String.format(Locale.ROOT, "%.2f dB", db);
     }
 
+    /** An error rate to two significant digits: {@code 1.3e-2}. */
+    static String errorRate(double rate) {
+        return String.format(Locale.ROOT, "%.1e", rate).replaceFirst("e([+-])0(\\d)$", "e$1$2");
+    }
+
     static String operations(double count) {
         return digits(count) + " operations a bit";
     }

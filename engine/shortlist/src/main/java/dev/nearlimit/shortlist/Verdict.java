@@ -63,9 +63,7 @@ final class Verdict {
     }
 
     private static String name(SchemeResult scheme) {
-        String decoder = scheme.decoder().split(":", 2)[0];
-        String word = scheme.quantiser().equals("none") ? "" : " (quantised)";
-        return scheme.code() + " with " + decoder + word + " on "
+        return scheme.code() + " with " + scheme.shortDecoder() + " on "
                 + scheme.modulation().toUpperCase(Locale.ROOT);
     }
 }

@@ -1,6 +1,8 @@
 package dev.nearlimit.shortlist.result;
 
 import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 
 /**
  * What was found for one scheme. All Eb/N0 count the energy of everything sent for a payload against its information
@@ -103,10 +105,22 @@ public record SchemeResult(
         String note,
         List<Point> points,
         List<ExactPoint> exactCurve) {
+    private static final Pattern WORD = Pattern.compile("word=(\\d+)");
+
     public SchemeResult {
         fails = List.copyOf(fails);
         points = List.copyOf(points);
         exactCurve = exactCurve == null ? null : List.copyOf(exactCurve);
+    }
+
+    /**
+     * The decoder in a word or two: its family, and the bits of its LLRs where they are quantised. The whole of its
+     * settings stands in {@link #decoder()}.
+     */
+    public String shortDecoder() {
+        String name = decoder.split(":", 2)[0];
+        Matcher word = WORD.matcher(quantiser);
+        return word.find() ? name + " (" + word.group(1) + "-bit)" : name;
     }
 
     /** This scheme with its place among those that meet every demand. */
