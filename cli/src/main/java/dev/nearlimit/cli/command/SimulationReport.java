@@ -100,10 +100,11 @@ record SimulationReport(
     }
 
     private String closingLine() {
-        return "Took " + Numbers.duration(performance.elapsedS()) + " on " + performance.threads()
+        String line = "Took " + Numbers.duration(performance.elapsedS()) + " on " + performance.threads()
                 + (performance.threads() == 1 ? " thread (" : " threads (")
                 + performance.kernel() + " kernels): " + Numbers.engineering(framesPerS()) + " frames/s, "
-                + Numbers.fixed(codedMbPerS(), codedMbPerS() < 10 ? 2 : 0) + " Mb/s of code bits.\n";
+                + Numbers.fixed(codedMbPerS(), codedMbPerS() < 10 ? 2 : 0) + " Mb/s of code bits.";
+        return String.join("\n", TextTable.wrap(line, TextTable.WIDTH)) + "\n";
     }
 
     private double framesPerS() {

@@ -7,12 +7,14 @@ import java.nio.charset.StandardCharsets;
 import me.tongfei.progressbar.ConsoleProgressBarConsumer;
 import me.tongfei.progressbar.ProgressBar;
 import me.tongfei.progressbar.ProgressBarBuilder;
-import me.tongfei.progressbar.ProgressBarStyle;
+import me.tongfei.progressbar.ProgressState;
 
 /** A bar with an estimate of the time left, drawn in place on standard error and taken away at the end. */
 final class DrawnProgress implements Progress {
     private static final int STEPS = 1000;
     private static final int WIDTH = 79;
+    private static final int BAR = 20;
+    private static final double NANOSECONDS = 1e9;
     private static final int REDRAW_MS = 250;
     /** Work that ends sooner shows nothing. */
     private static final long PATIENCE_NS = 1_000_000_000L;
@@ -34,7 +36,7 @@ final class DrawnProgress implements Progress {
             bar = newBar();
         }
         bar.stepTo(Math.round(STEPS * fraction));
-        bar.setExtraMessage(" " + detail);
+        bar.setExtraMessage(detail);
     }
 
     private ProgressBar newBar() {
@@ -42,13 +44,21 @@ final class DrawnProgress implements Progress {
         return new ProgressBarBuilder()
                 .setTaskName(task)
                 .setInitialMax(STEPS)
-                .setStyle(ProgressBarStyle.ASCII)
                 .setUpdateIntervalMillis(REDRAW_MS)
-                .setUnit(" %", STEPS / 100)
-                .startsFrom(0, java.time.Duration.ofNanos(System.nanoTime() - start))
+                .setRenderer((state, width) -> line(state))
                 .setConsumer(new ConsoleProgressBarConsumer(terminal, WIDTH))
                 .clearDisplayOnFinish()
                 .build();
+    }
+
+    private String line(ProgressState state) {
+        double fraction = state.getNormalizedProgress();
+        int full = (int) (BAR * fraction);
+        String line = task + " [" + "=".repeat(full) + " ".repeat(BAR - full) + "] "
+                + Estimate.text((System.nanoTime() - start) / NANOSECONDS, fraction) + " (" + state.getExtraMessage()
+                + ")";
+        // Blanks to the end wipe what a longer line has left.
+        return (line + " ".repeat(WIDTH)).substring(0, WIDTH);
     }
 
     @Override

@@ -1,6 +1,5 @@
 package dev.nearlimit.cli.progress;
 
-import dev.nearlimit.cli.output.Numbers;
 import java.io.PrintWriter;
 import java.util.function.LongSupplier;
 
@@ -31,8 +30,7 @@ final class SparseProgress implements Progress {
             return;
         }
         nextS = elapsedS * GROWTH;
-        String left = fraction > 0 ? ", about " + Numbers.duration(elapsedS * (1 - fraction) / fraction) + " left" : "";
-        err.println("nearlimit: " + task + " " + Math.round(100 * fraction) + " %" + left + " (" + detail + ")");
+        err.println("nearlimit: " + task + " " + Estimate.text(elapsedS, fraction) + " (" + detail + ")");
         err.flush();
     }
 
