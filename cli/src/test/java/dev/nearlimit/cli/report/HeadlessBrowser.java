@@ -16,7 +16,7 @@ import org.junit.jupiter.api.Assumptions;
  * Opens a local page in a headless Chromium and hands back the document after its scripts have run, with what they wrote
  * to the console. A new, empty profile is used each time; the process is killed when its time is up.
  */
-final class HeadlessBrowser {
+public final class HeadlessBrowser {
     private static final List<String> NAMES = List.of("chromium", "chromium-browser");
     private static final Duration TIME_LIMIT = Duration.ofSeconds(60);
 
@@ -30,7 +30,7 @@ final class HeadlessBrowser {
     }
 
     /** The browser of this machine; the test that asks is skipped, with the reason, where there is none. */
-    static HeadlessBrowser findOrSkip() {
+    public static HeadlessBrowser findOrSkip() {
         Optional<HeadlessBrowser> found = Stream.concat(
                         Stream.of(System.getenv().getOrDefault("PATH", "").split(File.pathSeparator))
                                 .flatMap(folder -> NAMES.stream().map(name -> Path.of(folder, name))),
@@ -51,7 +51,7 @@ final class HeadlessBrowser {
      * @param console what the page or the browser wrote to the console, one line each; the log does not tell errors from
      *     other lines, so a page that should be without errors had better write nothing
      */
-    record Page(String dom, List<String> console) {}
+    public record Page(String dom, List<String> console) {}
 
     /**
      * Opens a page.
@@ -59,7 +59,7 @@ final class HeadlessBrowser {
      * @param page the file
      * @param scratch an empty folder for the profile and the output
      */
-    Page open(Path page, Path scratch) throws IOException, InterruptedException {
+    public Page open(Path page, Path scratch) throws IOException, InterruptedException {
         Path dom = scratch.resolve("dom.html");
         Path log = scratch.resolve("browser.log");
         Process browser = new ProcessBuilder(
