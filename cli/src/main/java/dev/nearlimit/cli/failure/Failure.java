@@ -1,5 +1,6 @@
 package dev.nearlimit.cli.failure;
 
+import dev.nearlimit.algebra.errorrate.InvalidErrorRateException;
 import dev.nearlimit.algebra.weight.InfeasibleEnumerationException;
 import dev.nearlimit.cli.ExitCode;
 import dev.nearlimit.codes.InvalidCodeException;
@@ -26,6 +27,7 @@ public record Failure(String message, String file, int line, int column, int exi
             InfeasibleEnumerationException.class,
             InvalidCodeException.class,
             InvalidDecoderException.class,
+            InvalidErrorRateException.class,
             InvalidLimitException.class,
             InvalidRequirementException.class,
             InvalidSimulationException.class);

@@ -50,7 +50,7 @@ class DecoderDesignatorTest {
                         + " min-sum:iterations=20,schedule=layered,early-stop=true,offset=1,message-word=5,"
                         + "posterior-word=9,word=4,step=1,rise=mid-tread",
                 "min-sum:word=3,rise=mid-rise |"
-                        + " min-sum:iterations=20,schedule=layered,early-stop=true,scale=6/8,message-word=4,"
+                        + " min-sum:iterations=20,schedule=layered,early-stop=true,offset=1,message-word=4,"
                         + "posterior-word=6,word=3,step=2,rise=mid-rise"
             })
     void defaultsAreSpelledOutAndReadBack(String given, String expected) {
