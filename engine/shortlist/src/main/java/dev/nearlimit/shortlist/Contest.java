@@ -100,6 +100,10 @@ final class Contest {
                     contender.ownLimitDb()));
             return true;
         }
+        if (CurveSearch.outOfReach(contender.fit().codewordFerTarget())) {
+            standing.drop("not simulated: so low an error rate cannot be shown by simulation");
+            return true;
+        }
         return false;
     }
 
@@ -179,6 +183,8 @@ final class Contest {
         List<Standing> unknown = standings.stream()
                 .filter(standing ->
                         standing.curve() == null || !standing.curve().found())
+                .filter(standing ->
+                        !CurveSearch.outOfReach(standing.contender().fit().codewordFerTarget()))
                 .toList();
         workExpected = workDone + unknown.size();
         for (Standing standing : unknown) {

@@ -1,5 +1,6 @@
 package dev.nearlimit.shortlist;
 
+import dev.nearlimit.shortlist.evaluation.CurveSearch;
 import dev.nearlimit.shortlist.requirement.Requirement;
 import dev.nearlimit.shortlist.result.SchemeResult.Failure;
 import dev.nearlimit.simulation.search.MeasuredPoint;
@@ -92,6 +93,12 @@ final class Demands {
                             "the limit at its rate alone, %.2f dB, needs %s more",
                             limit,
                             Units.decibels(limit - leftDb))));
+        } else if (standing.curve() == null
+                && CurveSearch.outOfReach(standing.contender().fit().codewordFerTarget())) {
+            failures.add(new Failure(
+                    "evidence for codeword FER "
+                            + Units.errorRate(standing.contender().fit().codewordFerTarget()),
+                    "simulation shows no rate below " + Units.errorRate(CurveSearch.lowestFer())));
         } else if (standing.curve() != null && standing.curve().nearNeeded() != null) {
             MeasuredPoint last = standing.curve().nearNeeded();
             double low = new ErrorRateIntervals()

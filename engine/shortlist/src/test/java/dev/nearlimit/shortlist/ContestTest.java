@@ -188,4 +188,24 @@ class ContestTest {
         assertTrue(schemes.get(0).meets());
         assertTrue(schemes.get(0).operationsPerBit().worstCase() <= 1000);
     }
+
+    @Test
+    void doesNotClaimWhatSimulationCannotShow() {
+        KnownRates rates = new KnownRates(Map.of("bch:255,163", 0.0));
+        List<SchemeResult> schemes = contest(
+                Requirements.of(
+                        9.0,
+                        new Payload(324, 1e-9),
+                        candidate("ldpc-802.11n:648,1/2", "sum-product"),
+                        candidate("bch:255,163", "bounded-distance")),
+                rates);
+        assertFalse(rates.framesSpent.containsKey("ldpc-802.11n:648,1/2"));
+        assertEquals("bch:255,163", schemes.get(0).code(), "an exact rate needs no simulation");
+        assertTrue(schemes.get(0).meets());
+        SchemeResult refused = find(schemes, "ldpc-802.11n:648,1/2", "qpsk");
+        assertFalse(refused.meets());
+        assertEquals("evidence for codeword FER 1.0e-9", refused.fails().get(0).demand());
+        assertEquals(
+                "simulation shows no rate below 1.6e-6", refused.fails().get(0).by());
+    }
 }

@@ -44,6 +44,19 @@ public final class CurveSearch {
     }
 
     /**
+     * Whether so low a target is out of simulation's reach: even a few dozen frame errors at it take more codewords than
+     * a point may have.
+     */
+    public static boolean outOfReach(double targetFer) {
+        return COARSE_ERRORS / targetFer > MOST_FRAMES;
+    }
+
+    /** The lowest codeword FER that simulation can show. */
+    public static double lowestFer() {
+        return (double) COARSE_ERRORS / MOST_FRAMES;
+    }
+
+    /**
      * Brackets the needed Eb/N0 between points at most 0.25 dB apart.
      *
      * @param startDb where to begin [dB]
