@@ -3,6 +3,7 @@ package dev.nearlimit.codes;
 import dev.nearlimit.codes.gf2.BitMatrix;
 import dev.nearlimit.codes.gf2.Elimination;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
+import dev.nearlimit.codes.structure.GuaranteedDistance;
 import dev.nearlimit.codes.structure.Structure;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -224,6 +225,15 @@ public final class Code {
     /** The minimum distance where the family knows it; search belongs to the algebra room. */
     public Optional<KnownDistance> knownDistance() {
         return Optional.ofNullable(knownDistance);
+    }
+
+    /** A lower bound on the minimum distance that needs no search: the distance itself where it is known; else 1. */
+    public int guaranteedDistance() {
+        return knownDistance != null
+                ? knownDistance.value()
+                : structure(GuaranteedDistance.class)
+                        .map(GuaranteedDistance::value)
+                        .orElse(1);
     }
 
     /** The structure of the given kind, if this code has it. */

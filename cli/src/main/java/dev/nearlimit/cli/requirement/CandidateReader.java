@@ -40,6 +40,7 @@ final class CandidateReader {
             List<DecoderChoice> choices = fields.values("decoders", DecoderDesignator::parse);
             fields.refuseUnknown();
             for (Named named : codes) {
+                requireRedundancy(fields, item, named.code());
                 for (int i = 0; i < choices.size(); i++) {
                     requireFit(fields, decoders.get(i), choices.get(i), named.code());
                 }
@@ -101,6 +102,14 @@ final class CandidateReader {
             default ->
                 throw fields.at(fields.place("matrix"), "matrix is '" + text + "', expected generator or parity");
         };
+    }
+
+    private static void requireRedundancy(FieldReader fields, YamlNode item, Code code) {
+        if (code.k() == code.n()) {
+            throw fields.at(
+                    item,
+                    code.designator() + " has no redundancy (n = k = " + code.n() + "), so that it corrects nothing");
+        }
     }
 
     private static void requireFit(FieldReader fields, YamlNode place, DecoderChoice choice, Code code) {

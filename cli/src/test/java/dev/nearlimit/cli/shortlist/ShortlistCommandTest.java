@@ -159,8 +159,7 @@ class ShortlistCommandTest {
         Execution execution = run();
         assertEquals(ExitCode.BAD_INPUT, execution.exitCode());
         assertEquals(
-                "nearlimit: " + file + ":8:27: target FER is 2.0, must lie between 0 and 1, neither included\n",
-                execution.err());
+                "nearlimit: " + file + ":8:27: target FER is 2.0, must be above 0 and below 0.5\n", execution.err());
         assertFalse(Files.exists(out));
         JsonNode error =
                 new ObjectMapper().readTree(run("--format", "json").err()).get("error");

@@ -5,6 +5,7 @@ import dev.nearlimit.codes.InvalidCodeException;
 import dev.nearlimit.codes.gf2.BitMatrix;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
 import dev.nearlimit.codes.structure.BchStructure;
+import dev.nearlimit.codes.structure.GuaranteedDistance;
 import dev.nearlimit.codes.structure.QuasiCyclicStructure;
 import java.util.Arrays;
 import java.util.Optional;
@@ -14,7 +15,7 @@ import java.util.Optional;
  * last information positions, except in a BCH code, where they are the first, which carry the highest powers of x: what
  * is left is then again a polynomial of lower degree with the same zeros, as {@link BchStructure} says.
  *
- * <p>A minimum distance known of the mother code is only a lower bound of the shortened one, so none is attached.
+ * <p>A minimum distance known of the mother code is only a lower bound of the shortened one, and attached as such.
  *
  * @param bits information bits left out, at least 0
  */
@@ -50,6 +51,13 @@ public record Shortening(int bits) {
             throw new InvalidCodeException(mother.designator() + KEY + bits + ": the code has " + mother.k()
                     + " information bits, expected to leave out 1 .. " + (mother.k() - 1));
         }
+        Code shortened = shorten(mother);
+        return mother.guaranteedDistance() > 1
+                ? shortened.withStructure(new GuaranteedDistance(mother.guaranteedDistance()))
+                : shortened;
+    }
+
+    private Code shorten(Code mother) {
         Optional<BchStructure> bch = mother.structure(BchStructure.class);
         int firstKept = bch.isPresent() ? bits : 0;
         int[] columns = keptColumns(mother, firstKept);

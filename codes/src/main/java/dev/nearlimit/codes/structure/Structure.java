@@ -1,4 +1,4 @@
 package dev.nearlimit.codes.structure;
 
 /** Something known about a code beyond its matrices; see the package's description. */
-public sealed interface Structure permits BchStructure, QuasiCyclicStructure {}
+public sealed interface Structure permits BchStructure, GuaranteedDistance, QuasiCyclicStructure {}

@@ -42,9 +42,22 @@ record Contender(String family, PayloadFit fit, DecoderChoice choice, Limits lim
         }
     }
 
-    /** The least Eb/N0 that any code of this rate could need with this kind of decoder [dB]. */
-    double ownLimitDb() {
-        return choice.decoder().hardDecision() ? limits.hardDecisionDb() : limits.modulationDb();
+    /**
+     * An Eb/N0 below which no code of this rate and length reaches the payload's error rate with this kind of decoder [dB]
+     * (Fano's inequality: C >= R (1 - F) - h(F) / n, n being all bits sent for a payload); -infinity where it rules
+     * nothing out.
+     */
+    double provenLimitDb() {
+        double fer = fit.payloadFer();
+        double entropy = -(fer * Math.log(fer) + (1 - fer) * Math.log1p(-fer)) / Math.log(2);
+        double capacity = fit.rate() * (1 - fer) - entropy / fit.bitsSent();
+        if (capacity <= 0) {
+            return Double.NEGATIVE_INFINITY;
+        }
+        double esn0 = choice.decoder().hardDecision()
+                ? HardDecisionAwgn.leastEsn0(capacity)
+                : BinaryInputAwgn.leastEsn0(capacity);
+        return 10 * Math.log10(esn0 / fit.rate());
     }
 
     /** Operations per payload bit if every codeword takes the most iterations. */

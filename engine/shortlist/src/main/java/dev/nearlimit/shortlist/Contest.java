@@ -13,7 +13,8 @@ import java.util.Optional;
 import java.util.function.BooleanSupplier;
 
 /**
- * Spends simulation where the answer needs it. Contenders with an exact error rate cost nothing. Of the others, those
+ * Spends simulation where the answer needs it. Contenders with an exact error rate are simulated only for their wrong
+ * bits a failed frame, and only while in the running. Of the others, those
  * that fail bandwidth, latency or budget, or whose limit lies above the available Eb/N0, are dropped unsimulated; the
  * rest are bracketed coarsely, climbing no higher than the available Eb/N0, where a few dozen frame errors drop those
  * that miss it; and only those whose interval reaches the best one's are refined. If nothing meets the requirement,
@@ -62,6 +63,7 @@ final class Contest {
             step("bracketing " + standing.contender().describe(), 1);
             bracketWithinReach(standing);
         }
+        decideTheUndecided();
         if (winners().isEmpty()) {
             lookForTheClosest();
         } else {
@@ -79,6 +81,9 @@ final class Contest {
             double needed = exact.get().neededEbn0Db(contender.fit().codewordFerTarget())
                     + contender.fit().fillerDb();
             boolean inTheRunning = fits && needed <= demands.leftDb();
+            if (inTheRunning) {
+                show("measuring " + contender.describe(), 0);
+            }
             standing.setCurve(
                     inTheRunning
                             ? standing.search().exact(exact.get())
@@ -93,11 +98,12 @@ final class Contest {
             standing.drop("dropped unsimulated: it fails another demand whatever its Eb/N0");
             return true;
         }
-        if (contender.ownLimitDb() > demands.leftDb()) {
+        double limitDb = contender.provenLimitDb();
+        if (limitDb > demands.leftDb()) {
             standing.drop(String.format(
                     Locale.ROOT,
-                    "dropped unsimulated: no code of its rate can work below %.2f dB",
-                    contender.ownLimitDb()));
+                    "dropped unsimulated: no code of its rate and length reaches the target below %.2f dB",
+                    limitDb));
             return true;
         }
         if (CurveSearch.outOfReach(contender.fit().codewordFerTarget())) {
@@ -133,7 +139,8 @@ final class Contest {
     private static double startDb(Contender contender) {
         int n = contender.fit().code().n();
         int k = contender.fit().code().k();
-        double ownLimit = contender.ownLimitDb() - contender.fit().fillerDb();
+        double ownLimit =
+                Math.max(-1.5, contender.provenLimitDb()) - contender.fit().fillerDb();
         try {
             return Math.max(
                     ownLimit,
@@ -146,8 +153,10 @@ final class Contest {
 
     /** Two decibels above what sending the same bits uncoded needs: a code that is worse is not worth a search. */
     private static double giveUpDb(Contender contender) {
-        double bitErrorRate =
-                contender.fit().codewordFerTarget() / contender.fit().code().k();
+        // A payload error rate just below one half of a single bit still stands for some Eb/N0.
+        double bitErrorRate = Math.min(
+                0.4,
+                contender.fit().codewordFerTarget() / contender.fit().code().k());
         return UncodedBinary.ebn0DbForBitErrorRate(bitErrorRate) + 2;
     }
 
@@ -159,6 +168,27 @@ final class Contest {
                 .toList();
     }
 
+    /** Refines those whose coarse interval contains the available Eb/N0, so that it does not decide on few errors. */
+    private void decideTheUndecided() {
+        for (Standing standing : standings) {
+            if (cancelled.getAsBoolean()) {
+                return;
+            }
+            if (isCoarse(standing)
+                    && standing.neededLowDb() <= demands.leftDb()
+                    && demands.leftDb() <= standing.neededHighDb()) {
+                step("deciding on " + standing.contender().describe(), REFINEMENT_WORK);
+                standing.setCurve(standing.search().refined());
+            }
+        }
+    }
+
+    private static boolean isCoarse(Standing standing) {
+        return standing.curve() != null
+                && standing.curve().found()
+                && standing.curve().stage().equals("coarse");
+    }
+
     /** Refines from the best downwards, as long as an interval reaches that of the best refined so far. */
     private void refineTheBest() {
         double bestHigh = Double.POSITIVE_INFINITY;
@@ -168,11 +198,11 @@ final class Contest {
                 return;
             }
             boolean couldWin = standing.neededLowDb() <= bestHigh;
-            if (couldWin && standing.curve().stage().equals("coarse")) {
+            if (couldWin && isCoarse(standing)) {
                 step("refining " + standing.contender().describe(), REFINEMENT_WORK);
                 standing.setCurve(standing.search().refined());
                 workExpected += ++refined >= EXPECTED_REFINEMENTS ? REFINEMENT_WORK : 0;
-            } else if (!couldWin && standing.curve().stage().equals("coarse")) {
+            } else if (isCoarse(standing)) {
                 standing.drop("not refined: its interval lies above the best scheme's");
             }
             bestHigh = Math.min(bestHigh, standing.neededHighDb());

@@ -4,7 +4,6 @@ import dev.nearlimit.shortlist.evaluation.CurveSearch;
 import dev.nearlimit.shortlist.requirement.Requirement;
 import dev.nearlimit.shortlist.result.SchemeResult.Failure;
 import dev.nearlimit.simulation.search.MeasuredPoint;
-import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -60,69 +59,75 @@ final class Demands {
 
     /**
      * How far a scheme misses the requirement as a whole [dB]: the sum over failed demands of 10 log10 of what it takes
-     * over what is allowed, for Eb/N0 simply the dB missing. Orders rejected schemes; 0 if nothing is known to fail.
+     * over what is allowed, for Eb/N0 simply the dB missing. Infinite where the needed Eb/N0 is not known and not proven
+     * to suffice, so that such a scheme never passes for a near miss.
      */
     double missDb(Standing standing, Carriage carriage) {
-        return Math.max(0, ebn0MissDb(standing))
+        double ebn0MissDb = Double.isNaN(standing.neededDb())
+                ? Double.POSITIVE_INFINITY
+                : Math.max(0, standing.neededDb() - leftDb);
+        return ebn0MissDb
                 + excessDb(bandwidthExcess(carriage))
                 + excessDb(latencyExcess(carriage))
                 + excessDb(operationsExcess(standing.contender()));
     }
 
-    /** Eb/N0 missing [dB], at least what is proven; negative or 0 where it suffices or nothing is known. */
-    private double ebn0MissDb(Standing standing) {
-        if (!Double.isNaN(standing.neededDb())) {
-            return standing.neededDb() - leftDb;
-        }
-        return standing.contender().ownLimitDb() - leftDb;
-    }
-
     private void ebn0Failure(Standing standing, List<Failure> failures) {
         String demand = String.format(Locale.ROOT, "Eb/N0 %.2f dB", leftDb);
         double needed = standing.neededDb();
-        double limit = standing.contender().ownLimitDb();
+        double targetFer = standing.contender().fit().codewordFerTarget();
+        double limit = standing.contender().provenLimitDb();
         if (!Double.isNaN(needed)) {
             if (needed > leftDb) {
-                failures.add(new Failure(demand, "needs " + Units.decibels(needed - leftDb) + " more"));
+                String doubt = standing.neededLowDb() <= leftDb ? ", which its interval cannot tell from none" : "";
+                failures.add(new Failure(demand, "needs " + Units.decibels(needed - leftDb) + " more" + doubt));
             }
         } else if (limit > leftDb) {
             failures.add(new Failure(
                     demand,
                     String.format(
                             Locale.ROOT,
-                            "the limit at its rate alone, %.2f dB, needs %s more",
+                            "no code of its rate and length works below %.2f dB, %s more",
                             limit,
                             Units.decibels(limit - leftDb))));
-        } else if (standing.curve() == null
-                && CurveSearch.outOfReach(standing.contender().fit().codewordFerTarget())) {
-            failures.add(new Failure(
-                    "evidence for codeword FER "
-                            + Units.errorRate(standing.contender().fit().codewordFerTarget()),
-                    "simulation shows no rate below " + Units.errorRate(CurveSearch.lowestFer())));
-        } else if (standing.curve() != null && standing.curve().nearNeeded() != null) {
-            MeasuredPoint last = standing.curve().nearNeeded();
-            double low = new ErrorRateIntervals()
-                    .frameErrorRate(last.counts(), last.rule())
-                    .low();
-            failures.add(new Failure(
-                    demand,
-                    String.format(
-                            Locale.ROOT,
-                            "codeword FER above %s at %.2f dB after %d frame errors, %s allowed",
-                            Units.errorRate(low),
-                            last.ebn0Db() + standing.contender().fit().fillerDb(),
-                            last.counts().frameErrors(),
-                            Units.errorRate(standing.contender().fit().codewordFerTarget()))));
+        } else if (standing.curve() == null) {
+            if (CurveSearch.outOfReach(targetFer)) {
+                failures.add(new Failure(
+                        "evidence for codeword FER " + Units.errorRate(targetFer),
+                        "simulation shows no rate below " + Units.errorRate(CurveSearch.lowestFer())));
+            }
+        } else if (standing.curve().complete()) {
+            failures.add(new Failure(demand, shortfall(standing)));
         }
     }
 
+    /** What was seen at the highest Eb/N0 tried within reach; a scheme is here only if its target was not met there. */
+    private String shortfall(Standing standing) {
+        double fillerDb = standing.contender().fit().fillerDb();
+        MeasuredPoint last = null;
+        for (MeasuredPoint point : standing.curve().points()) {
+            if (last == null || point.ebn0Db() + fillerDb <= leftDb + 1e-6) {
+                last = point;
+            }
+        }
+        return String.format(
+                Locale.ROOT,
+                "codeword FER %s at %.2f dB (%d errors in %d), %s allowed",
+                Units.errorRate(last.fer()),
+                last.ebn0Db() + fillerDb,
+                last.counts().frameErrors(),
+                last.counts().frames(),
+                Units.errorRate(standing.contender().fit().codewordFerTarget()));
+    }
+
     private double bandwidthExcess(Carriage carriage) {
-        return carriage.occupiedBandwidthHz() / requirement.link().bandwidthHz();
+        return withoutRounding(
+                carriage.occupiedBandwidthHz() / requirement.link().bandwidthHz());
     }
 
     private double latencyExcess(Carriage carriage) {
         return requirement.latencyS().isPresent()
-                ? carriage.airS() / requirement.latencyS().getAsDouble()
+                ? withoutRounding(carriage.airS() / requirement.latencyS().getAsDouble())
                 : 0;
     }
 
@@ -135,5 +140,10 @@ final class Demands {
 
     private static double excessDb(double ratio) {
         return ratio > 1 ? 10 * Math.log10(ratio) : 0;
+    }
+
+    /** A ratio that exceeds 1 by rounding alone counts as 1. */
+    private static double withoutRounding(double ratio) {
+        return Math.abs(ratio - 1) < 1e-12 ? 1 : ratio;
     }
 }

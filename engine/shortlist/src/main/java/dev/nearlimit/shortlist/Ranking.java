@@ -18,8 +18,10 @@ final class Ranking {
             .thenComparingDouble(row -> row.scheme().occupiedBandwidthHz())
             .thenComparingDouble(row -> row.scheme().operationsPerBit().worstCase());
 
-    private static final Comparator<Row> NEAREST_FIRST = Comparator.comparingInt(
-                    (Row row) -> row.scheme().fails().size())
+    /** Schemes whose needed Eb/N0 is known come first: only of them can be said how near they are. */
+    private static final Comparator<Row> NEAREST_FIRST = Comparator.comparing(
+                    (Row row) -> row.scheme().neededEbn0Db() == null)
+            .thenComparingInt(row -> row.scheme().fails().size())
             .thenComparingDouble(Row::missDb)
             .thenComparing(row -> row.scheme().neededEbn0Db(), Comparator.nullsLast(Comparator.naturalOrder()));
 
@@ -49,12 +51,13 @@ final class Ranking {
         return low(other) <= high(best);
     }
 
+    /** An end of the interval that is not known is as far out as can be. */
     private static double low(SchemeResult scheme) {
-        return scheme.neededEbn0DbLow() == null ? scheme.neededEbn0Db() : scheme.neededEbn0DbLow();
+        return scheme.neededEbn0DbLow() == null ? Double.NEGATIVE_INFINITY : scheme.neededEbn0DbLow();
     }
 
     private static double high(SchemeResult scheme) {
-        return scheme.neededEbn0DbHigh() == null ? scheme.neededEbn0Db() : scheme.neededEbn0DbHigh();
+        return scheme.neededEbn0DbHigh() == null ? Double.POSITIVE_INFINITY : scheme.neededEbn0DbHigh();
     }
 
     private static boolean onFront(Row row, List<Row> meeting) {

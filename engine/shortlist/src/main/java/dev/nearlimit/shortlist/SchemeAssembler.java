@@ -88,14 +88,19 @@ final class SchemeAssembler {
                 false,
                 false,
                 needed == null ? "dropped" : curve.stage(),
-                note(standing, needed, failures),
+                note(standing, needed),
                 points(standing),
                 exactCurve(standing));
     }
 
-    private String note(Standing standing, Double needed, List<Failure> failures) {
-        boolean marginUncertain = needed != null && failures.isEmpty() && standing.neededHighDb() > demands.leftDb();
-        return marginUncertain ? "its interval reaches beyond the available Eb/N0" : standing.note();
+    private String note(Standing standing, Double needed) {
+        if (standing.curve() != null && !standing.curve().complete()) {
+            return "not finished: the run was cut short";
+        }
+        boolean marginUncertain = needed != null
+                && standing.neededLowDb() <= demands.leftDb()
+                && demands.leftDb() < standing.neededHighDb();
+        return marginUncertain ? "its interval contains the available Eb/N0" : standing.note();
     }
 
     /** Null where the BER is so uncertain that it tells nothing: 0, or one half and more. */

@@ -43,7 +43,7 @@ public final class Shortlister {
                 requirement.name(),
                 LinkBudget.lines(requirement.link()),
                 demands.leftDb(),
-                Verdict.of(ranked),
+                Verdict.of(ranked, contest.complete()),
                 ranked,
                 ReferenceCurveMaker.make());
         return new ShortlistResult(meters.seed(), List.of(point), contest.complete(), meters.framesSimulated());

@@ -24,7 +24,12 @@ final class Units {
 
     /** An error rate to two significant digits: {@code 1.3e-2}. */
     static String errorRate(double rate) {
-        return String.format(Locale.ROOT, "%.1e", rate).replaceFirst("e([+-])0(\\d)$", "e$1$2");
+        if (rate == 1 || rate == 0) {
+            return rate == 1 ? "1" : "0";
+        }
+        return String.format(Locale.ROOT, "%.1e", rate)
+                .replaceFirst("e([+-])0(\\d)$", "e$1$2")
+                .replace("e+", "e");
     }
 
     static String operations(double count) {

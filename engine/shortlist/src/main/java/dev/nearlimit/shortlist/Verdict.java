@@ -9,12 +9,15 @@ import java.util.stream.Collectors;
 final class Verdict {
     private Verdict() {}
 
-    static String of(List<SchemeResult> ranked) {
+    static String of(List<SchemeResult> ranked, boolean complete) {
         if (ranked.isEmpty()) {
             return "Nothing was considered.";
         }
         SchemeResult first = ranked.get(0);
-        return first.meets() ? winner(first, ranked) : closest(first);
+        if (!first.meets() && !complete) {
+            return "The run was cut short before it found a scheme that meets every demand.";
+        }
+        return (complete ? "" : "So far: ") + (first.meets() ? winner(first, ranked) : closest(first));
     }
 
     private static String winner(SchemeResult best, List<SchemeResult> ranked) {
@@ -52,8 +55,7 @@ final class Verdict {
         String misses = scheme.fails().stream()
                 .map(failure -> failure.demand() + ": " + failure.by())
                 .collect(Collectors.joining("; "));
-        return "No scheme meets every demand. " + name(scheme) + " comes closest; it misses "
-                + (misses.isEmpty() ? "an answer, since the run was cut short" : misses) + ".";
+        return "No scheme meets every demand. " + name(scheme) + " comes closest; it misses " + misses + ".";
     }
 
     private static boolean sameCodeAndDecoder(SchemeResult a, SchemeResult b) {

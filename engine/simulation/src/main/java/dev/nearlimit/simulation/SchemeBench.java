@@ -93,7 +93,7 @@ final class SchemeBench {
         key.add(
                 "zeros",
                 code.structure(BchStructure.class).map(BchStructure::toString).orElse("none"));
-        key.add("known distance", code.knownDistance().map(d -> d.value()).orElse(0));
+        key.add("guaranteed distance", code.guaranteedDistance());
         return key.add("decoder", scheme.decoder().designator())
                 .add("decoder revision", scheme.decoder().revision())
                 .add("quantiser", scheme.quantiser().designator())

@@ -16,7 +16,7 @@ import java.util.Optional;
  * right exactly when at most t of its n bits were received wrong.
  *
  * <p>BCH codes take t from their structure and are decoded by Berlekamp-Massey; a code extended by a parity bit corrects
- * the same t in n. Other codes of known minimum distance d correct t = (d-1)/2, rounded down, by a table of coset
+ * the same t in n. Other codes of known or guaranteed minimum distance d correct t = (d-1)/2, rounded down, by a table of coset
  * leaders; an even d leaves words at distance d/2 detected, since no codeword is within t of them.
  */
 public record BoundedDistanceSettings() implements DecoderSettings {
@@ -26,7 +26,7 @@ public record BoundedDistanceSettings() implements DecoderSettings {
         if (code.structure(BchStructure.class).isPresent()) {
             return Optional.empty();
         }
-        if (code.knownDistance().isEmpty()) {
+        if (code.guaranteedDistance() == 1 && code.knownDistance().isEmpty()) {
             return Optional.of("its minimum distance is not known without a search, and it is no BCH code");
         }
         return CosetLeaders.objection(code);
@@ -41,7 +41,7 @@ public record BoundedDistanceSettings() implements DecoderSettings {
         requireFit(code);
         return code.structure(BchStructure.class)
                 .map(BchStructure::t)
-                .orElseGet(() -> (code.knownDistance().orElseThrow().value() - 1) / 2);
+                .orElseGet(() -> (code.guaranteedDistance() - 1) / 2);
     }
 
     private static void requireFit(Code code) {

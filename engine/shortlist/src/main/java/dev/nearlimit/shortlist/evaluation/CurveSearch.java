@@ -26,6 +26,9 @@ public final class CurveSearch {
     /** Codewords that one point may take at most, so that a hopeless point ends. */
     private static final long MOST_FRAMES = 20_000_000;
 
+    /** Codewords at most where a formula gives the FER and only the wrong bits a failed frame are measured. */
+    private static final long MOST_FRAMES_BESIDE_A_FORMULA = 2_000_000;
+
     private final ErrorRateMeter meter;
     private final int informationBits;
     private final double targetFer;
@@ -89,7 +92,7 @@ public final class CurveSearch {
      */
     public ErrorCurve exact(ExactErrorRate rate) {
         double needed = rate.neededEbn0Db(targetFer);
-        MeasuredPoint point = measure(needed, 2 * COARSE_ERRORS);
+        MeasuredPoint point = measure(needed, 2 * COARSE_ERRORS, MOST_FRAMES_BESIDE_A_FORMULA);
         if (point.counts().frames() == 0) {
             return withoutMeasurement(rate, targetFer, false);
         }
@@ -118,9 +121,9 @@ public final class CurveSearch {
                 needed, needed, needed, "exact", rate.how(), "exact", List.of(), rate, null, null, complete);
     }
 
-    private MeasuredPoint measure(double ebn0Db, long errors) {
+    private MeasuredPoint measure(double ebn0Db, long errors, long mostFrames) {
         long microDb = Math.round(ebn0Db * 1e6);
-        StoppingRule rule = new StoppingRule((long) Math.min(MOST_FRAMES, Math.ceil(errors / targetFer)), errors);
+        StoppingRule rule = new StoppingRule((long) Math.min(mostFrames, Math.ceil(errors / targetFer)), errors);
         PointCounts counts = meter.measure(microDb, rule);
         return new MeasuredPoint(microDb, counts, rule);
     }

@@ -2,6 +2,7 @@ package dev.nearlimit.shortlist.evaluation;
 
 import dev.nearlimit.codes.Code;
 import dev.nearlimit.codes.catalogue.Shortening;
+import dev.nearlimit.shortlist.requirement.InvalidRequirementException;
 import dev.nearlimit.shortlist.requirement.Payload;
 
 /**
@@ -16,13 +17,26 @@ import dev.nearlimit.shortlist.requirement.Payload;
  */
 public record PayloadFit(Code code, int codewords, int payloadBits, double payloadFer) {
 
-    /** Fits a code to a payload. */
+    private static final long MOST_BITS_SENT = 100_000_000;
+
+    /**
+     * Fits a code to a payload.
+     *
+     * @throws InvalidRequirementException if a payload would take more bits than can reasonably be sent
+     */
     public static PayloadFit of(Code mother, Payload payload) {
         int bits = payload.bits();
         if (mother.k() > bits) {
             return new PayloadFit(new Shortening(mother.k() - bits).applyTo(mother), 1, bits, payload.fer());
         }
         int codewords = (bits + mother.k() - 1) / mother.k();
+        long sent = (long) codewords * mother.n();
+        if (sent > MOST_BITS_SENT) {
+            throw new InvalidRequirementException(
+                    "payload.bits",
+                    "a payload of " + bits + " bits takes " + sent + " bits sent with " + mother.designator()
+                            + ", at most " + MOST_BITS_SENT);
+        }
         return new PayloadFit(mother, codewords, bits, payload.fer());
     }
 

@@ -53,10 +53,10 @@ class RequirementTest {
                 () -> link(1, 0, 1, OptionalDouble.of(Double.POSITIVE_INFINITY), none));
         refused("link.losses", "loss 'rain' is -1.0 dB, must be 0 .. 200 dB", () -> new Loss("rain", -1));
         refused("payload.bits", "bits is 0, must be 1 .. 1000000", () -> new Payload(0, 0.1));
-        for (double fer : new double[] {0, 1, Double.NaN, -0.1}) {
+        for (double fer : new double[] {0, 0.5, 1, Double.NaN, -0.1}) {
             refused(
                     "payload.fer",
-                    "target FER is " + fer + ", must lie between 0 and 1, neither included",
+                    "target FER is " + fer + ", must be above 0 and below 0.5",
                     () -> new Payload(1, fer));
         }
         refused(

@@ -16,18 +16,21 @@ import java.util.TreeMap;
  * {@code errors} frame errors, or after {@code errors / target} frames, which is enough to know on which side of the
  * target it lies. {@link #refine} then measures two points 0.2 dB apart around the estimate with more errors.
  *
- * <p>The estimate interpolates log10 FER linearly between the two bracketing points. Its interval is where the straight
- * lines through the upper and through the lower ends of both points' FER intervals cross the target; each of these
- * intervals holds with 97.5 %, so that both hold, and with them the interpolated Eb/N0, with at least 95 %
- * (Bonferroni). What a straight line misses of a curve's bend over the bracket is not in it: below 0.01 dB over the
- * 0.2 dB of a refined bracket for waterfalls bending by less than 5 decades a squared dB.
+ * <p>The estimate interpolates log10 FER linearly between the two points that bracket the target. Its interval is where
+ * the broken lines through the upper and through the lower ends of all points' FER intervals cross the target; where no
+ * measured point lies surely below the target, points are added until one does. Each point's interval holds with 99 %,
+ * so that those of the five points around the target, which alone can move a crossing, hold together with 95 %
+ * (Bonferroni), and with them the crossing of the true curve, as far as it is straight between points. What a straight
+ * line misses of a curve's bend is not in it: below 0.01 dB over the 0.2 dB of a refined bracket for waterfalls bending
+ * by less than 5 decades a squared dB. A point that was cut short decides nothing.
  */
 public final class NeededEbn0Search {
-    private static final ErrorRateIntervals INTERVALS = new ErrorRateIntervals(0.975);
+    private static final ErrorRateIntervals INTERVALS = new ErrorRateIntervals(0.99);
     private static final long BRACKET_GRID_MICRO_DB = 250_000;
     private static final long REFINED_GRID_MICRO_DB = 50_000;
     private static final long REFINED_WIDTH_MICRO_DB = 200_000;
     private static final int MOST_REFINED_SHIFTS = 12;
+    private static final int MOST_POINTS_BEYOND = 6;
 
     private final ErrorRateMeter meter;
     private final double targetFer;
@@ -76,7 +79,23 @@ public final class NeededEbn0Search {
             }
             measure(onGrid((above().microDb() + below().microDb()) / 2e6, BRACKET_GRID_MICRO_DB), errors);
         }
+        makeSureOfBothSides(errors);
         return answer();
+    }
+
+    /** Adds points outwards until one is surely above the target and one surely below it. */
+    private void makeSureOfBothSides(long errors) {
+        for (int added = 0; !cutShort && above() != null && below() != null && added < MOST_POINTS_BEYOND; added++) {
+            MeasuredPoint first = measured.firstEntry().getValue();
+            MeasuredPoint last = measured.lastEntry().getValue();
+            if (interval(first).low() <= targetFer) {
+                measure(first.microDb() - BRACKET_GRID_MICRO_DB, errors);
+            } else if (interval(last).high() >= targetFer) {
+                measure(last.microDb() + BRACKET_GRID_MICRO_DB, errors);
+            } else {
+                return;
+            }
+        }
     }
 
     /**
@@ -105,6 +124,7 @@ public final class NeededEbn0Search {
                     upper = next;
                 }
             } else {
+                makeSureOfBothSides(errors);
                 return between(lower, upper);
             }
         }
@@ -154,10 +174,11 @@ public final class NeededEbn0Search {
         long frames = (long) Math.min(mostFrames, Math.ceil(errors / targetFer));
         StoppingRule rule = new StoppingRule(Math.max(1, frames), errors);
         PointCounts counts = meter.measure(microDb, rule);
-        cutShort |= !counts.complete();
         MeasuredPoint point = new MeasuredPoint(microDb, counts, rule);
-        if (counts.frames() > 0) {
+        if (counts.complete()) {
             measured.put(microDb, point);
+        } else {
+            cutShort = true;
         }
         return point;
     }
@@ -188,20 +209,53 @@ public final class NeededEbn0Search {
         double atLower = Math.log10(lower.fer());
         double atUpper = Math.log10(visibleFer(upper));
         double slope = (atUpper - atLower) / (x1 - x0);
-        double target = Math.log10(targetFer);
-        Interval lowerFer = INTERVALS.frameErrorRate(lower.counts(), lower.rule());
-        Interval upperFer = INTERVALS.frameErrorRate(upper.counts(), upper.rule());
-        double estimate = x0 + (target - atLower) / slope;
-        double low = crossing(x0, Math.log10(lowerFer.low()), x1, log10(upperFer.low()), slope, target);
-        double high = crossing(x0, Math.log10(lowerFer.high()), x1, log10(upperFer.high()), slope, target);
+        double estimate = x0 + (Math.log10(targetFer) - atLower) / slope;
         return new NeededEbn0(
                 estimate,
-                Math.min(low, estimate),
-                Math.max(high, estimate),
+                Math.min(lowEnd(), estimate),
+                Math.max(highEnd(), estimate),
                 lower,
                 upper,
                 new ArrayList<>(measured.values()),
                 !cutShort);
+    }
+
+    /** Where the line through the lower ends first meets the target. */
+    private double lowEnd() {
+        MeasuredPoint before = null;
+        for (MeasuredPoint point : measured.values()) {
+            double low = interval(point).low();
+            if (low <= targetFer) {
+                return before == null
+                        ? Double.NEGATIVE_INFINITY
+                        : crossing(before.ebn0Db(), interval(before).low(), point.ebn0Db(), low);
+            }
+            before = point;
+        }
+        return Double.POSITIVE_INFINITY;
+    }
+
+    /** Where the line through the upper ends last meets the target. */
+    private double highEnd() {
+        MeasuredPoint after = null;
+        for (MeasuredPoint point : measured.descendingMap().values()) {
+            double high = interval(point).high();
+            if (high >= targetFer) {
+                return after == null
+                        ? Double.POSITIVE_INFINITY
+                        : crossing(
+                                point.ebn0Db(),
+                                high,
+                                after.ebn0Db(),
+                                interval(after).high());
+            }
+            after = point;
+        }
+        return Double.NEGATIVE_INFINITY;
+    }
+
+    private static Interval interval(MeasuredPoint point) {
+        return INTERVALS.frameErrorRate(point.counts(), point.rule());
     }
 
     /** FER of a point, half a frame error standing in for none, since the logarithm needs something. */
@@ -209,19 +263,12 @@ public final class NeededEbn0Search {
         return Math.max(point.fer(), 0.5 / point.counts().frames());
     }
 
-    private static double log10(double value) {
-        return value > 0 ? Math.log10(value) : -300;
-    }
-
-    /** Where the line through both points meets the target; outside them it goes on with the measured slope. */
-    private static double crossing(double x0, double y0, double x1, double y1, double slope, double target) {
-        if (y0 <= target) {
-            return x0 + (target - y0) / slope;
-        }
-        if (y1 >= target) {
-            return x1 + (target - y1) / slope;
-        }
-        return x0 + (target - y0) / ((y1 - y0) / (x1 - x0));
+    /** Where the straight line of log FER through both points meets the target, which lies between them. */
+    private double crossing(double x0, double fer0, double x1, double fer1) {
+        // A lower end of 0 has no logarithm; far below everything, it leaves the crossing near the other point.
+        double y0 = Math.log10(Math.max(fer0, Double.MIN_NORMAL));
+        double y1 = Math.log10(Math.max(fer1, Double.MIN_NORMAL));
+        return x0 + (Math.log10(targetFer) - y0) / ((y1 - y0) / (x1 - x0));
     }
 
     private static long onGrid(double db, long grid) {

@@ -46,19 +46,39 @@ class NeededEbn0SearchTest {
     }
 
     /**
-     * The 95 % interval misses with at most 5 %. More than 28 misses in 200 seeded searches would come with a probability
-     * below 1e-6 if each missed with exactly 5 % (binomial tail).
+     * Curves steep and shallow, bent and straight, all with FER 1e-2 at 3 dB; the slope is in decades a dB. The 95 %
+     * interval may miss with 5 %; more than 44 misses in 400 seeded searches would then come with a probability below
+     * 1e-6 (binomial tail). Coarse and refined answers are held to it alike.
      */
-    @Test
-    void intervalCoversTheTruthAsOftenAsItSays() {
-        int missed = 0;
-        for (int seed = 0; seed < 200; seed++) {
-            NeededEbn0Search search = new NeededEbn0Search(new KnownRate(WATERFALL, seed), 1e-3, 1_000_000);
-            search.bracket(1.0, 12, 32);
-            NeededEbn0 found = search.refine(60);
-            missed += found.lowDb() > 3.0 || found.highDb() < 3.0 ? 1 : 0;
+    @ParameterizedTest
+    @ValueSource(doubles = {0.4, 1.0, 2.5, 5.0})
+    void intervalCoversTheTruthAsOftenAsItSays(double slope) {
+        DoubleUnaryOperator fer = db -> Math.min(1, Math.pow(10, -2 - slope * (db - 3)));
+        int missedCoarse = 0;
+        int missedRefined = 0;
+        for (int seed = 0; seed < 400; seed++) {
+            NeededEbn0Search search = new NeededEbn0Search(new KnownRate(fer, seed), 1e-2, 1_000_000);
+            missedCoarse += missed(search.bracket(1.0, 15, 32), 3.0);
+            missedRefined += missed(search.refine(60), 3.0);
         }
-        assertTrue(missed <= 28, missed + " of 200 intervals missed 3 dB");
+        assertTrue(missedCoarse <= 44, missedCoarse + " of 400 coarse intervals missed at slope " + slope);
+        assertTrue(missedRefined <= 44, missedRefined + " of 400 refined intervals missed at slope " + slope);
+    }
+
+    private static int missed(NeededEbn0 found, double truth) {
+        return found.lowDb() > truth || found.highDb() < truth ? 1 : 0;
+    }
+
+    /** A point that was cut short says nothing about the target, however few errors it shows. */
+    @Test
+    void aPointCutShortDecidesNothing() {
+        KnownRate meter = new KnownRate(WATERFALL, 1);
+        ErrorRateMeter cut = (microDb, rule) ->
+                microDb < 2_000_000 ? meter.measure(microDb, rule) : new PointCounts(64, 0, 0, 0, 0, 0, false);
+        NeededEbn0 found = new NeededEbn0Search(cut, 1e-3, 1_000_000).bracket(1.0, 12, 32);
+        assertFalse(found.complete());
+        assertFalse(found.bracketed());
+        assertEquals(Double.POSITIVE_INFINITY, found.highDb());
     }
 
     @ParameterizedTest
@@ -96,8 +116,8 @@ class NeededEbn0SearchTest {
     void spendsFewFramesOnTheBracket() {
         KnownRate meter = new KnownRate(WATERFALL, 3);
         new NeededEbn0Search(meter, 1e-3, 1_000_000).bracket(1.0, 12, 32);
-        // Two points at or above the target take 32 / 1e-3 frames each; all others are cheaper.
-        assertTrue(meter.framesSpent < 110_000, meter.framesSpent + " frames");
+        // Up to four points at or below the target take 32 / 1e-3 frames each; all others are cheaper.
+        assertTrue(meter.framesSpent < 160_000, meter.framesSpent + " frames");
     }
 
     @Test
