@@ -38,7 +38,7 @@ import picocli.CommandLine.Spec;
             "0:answered",
             "1:a check that was asked for failed",
             "2:bad input; one line on standard error says what and where",
-            "3:the tool failed, or its output could not be written",
+            "3:the tool failed, or standard output could not be written",
             "130:interrupted (143 after SIGTERM); what was finished is printed"
         })
 public final class NearlimitCommand implements Runnable {

@@ -51,6 +51,21 @@ public final class OutputFile {
         }
     }
 
+    /**
+     * Fails now rather than after the work, if a file can clearly not be written to a folder.
+     *
+     * @throws InputException if the folder is not writable, or a folder stands where the file would
+     */
+    public static void requireWritable(Path folder, String name) {
+        Path target = folder.resolve(name);
+        if (Files.isDirectory(target)) {
+            throw new InputException("cannot write: is a folder, a file was expected", target.toString(), 0, 0);
+        }
+        if (!Files.isWritable(folder.toAbsolutePath())) {
+            throw new InputException("cannot write to the folder: permission denied", folder.toString(), 0, 0);
+        }
+    }
+
     private static String reason(IOException e) {
         if (e instanceof NoSuchFileException || e instanceof NotDirectoryException) {
             return "the folder does not exist";

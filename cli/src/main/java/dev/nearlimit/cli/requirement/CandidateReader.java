@@ -90,6 +90,10 @@ final class CandidateReader {
             return new Named(
                     fields.located(place, () -> MatrixFile.readCode(file, role, MatrixLimits.standard())), "matrix");
         }
+        boolean looksLikeFile = designator.contains("/") || designator.matches(".*\\.(mtx|csv)");
+        if (looksLikeFile && !catalogue.isKnownFamily(designator)) {
+            throw fields.at(place, designator + " looks like a matrix file: add matrix: generator or matrix: parity");
+        }
         String family = designator.split(":", 2)[0];
         return new Named(fields.located(place, () -> catalogue.build(designator)), family);
     }

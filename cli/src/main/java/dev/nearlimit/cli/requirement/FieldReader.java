@@ -136,7 +136,11 @@ final class FieldReader {
     private YamlNode required(String name) {
         return find(name)
                 .orElseThrow(() -> new InputException(
-                        "field '" + dotted(name) + "' is missing", file, mapping.line(), mapping.column()));
+                        "field '" + dotted(name) + "' is missing; found here are "
+                                + String.join(", ", mapping.fields().keySet()),
+                        file,
+                        mapping.line(),
+                        mapping.column()));
     }
 
     private Optional<YamlNode> find(String name) {

@@ -31,7 +31,7 @@ public final class RequirementReader {
         RequirementReader reader = new RequirementReader(root);
         try {
             return reader.requirement(
-                    new CandidateReader(root, file.toAbsolutePath().getParent()));
+                    new CandidateReader(root, file.getParent() == null ? Path.of("") : file.getParent()));
         } catch (InvalidRequirementException e) {
             throw reader.at(e);
         }

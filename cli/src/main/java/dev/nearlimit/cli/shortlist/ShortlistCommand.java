@@ -21,6 +21,7 @@ import dev.nearlimit.simulation.Simulator;
 import java.io.PrintWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -41,6 +42,10 @@ import picocli.CommandLine.Spec;
             "closest, and exit code 0."
         })
 public final class ShortlistCommand implements Callable<Integer> {
+    private static final String RESULTS = "shortlist.json";
+    private static final String CSV = "shortlist.csv";
+    private static final String REPORT = "report.html";
+
     private final Session session;
 
     @Spec
@@ -121,19 +126,22 @@ public final class ShortlistCommand implements Callable<Integer> {
             throw new InputException("--out is a file, a folder was expected", folder.toString(), 0, 0);
         }
         OutputFile.makeFolder(folder);
+        for (String name : List.of(RESULTS, CSV, REPORT)) {
+            OutputFile.requireWritable(folder, name);
+        }
     }
 
     private void write(ShortlistReport report) {
         ObjectNode json = report.json();
-        OutputFile.write(folder.resolve("shortlist.json"), JsonText.of(json));
-        OutputFile.write(folder.resolve("shortlist.csv"), report.csv().toString());
-        OutputFile.write(folder.resolve("report.html"), HtmlReport.render(json));
+        OutputFile.write(folder.resolve(RESULTS), JsonText.of(json));
+        OutputFile.write(folder.resolve(CSV), report.csv().toString());
+        OutputFile.write(folder.resolve(REPORT), HtmlReport.render(json));
         PrintWriter out = spec.commandLine().getOut();
         switch (format) {
             case TABLE -> {
                 out.print(report.table());
-                out.println("written: " + folder.resolve("report.html") + ", " + folder.resolve("shortlist.csv") + ", "
-                        + folder.resolve("shortlist.json"));
+                out.println("written: " + folder.resolve(REPORT) + ", " + folder.resolve(CSV) + ", "
+                        + folder.resolve(RESULTS));
             }
             case CSV -> out.print(report.csv());
             case JSON -> out.print(JsonText.of(json));

@@ -44,13 +44,18 @@ final class ShortlistTable {
         budget(point);
         List<SchemeResult> meeting =
                 point.schemes().stream().filter(SchemeResult::meets).toList();
-        List<SchemeResult> rejected =
-                point.schemes().stream().filter(scheme -> !scheme.meets()).toList();
+        List<SchemeResult> rejected = point.schemes().stream()
+                .filter(scheme -> !scheme.fails().isEmpty())
+                .toList();
         if (!meeting.isEmpty()) {
             ranked(meeting);
         }
         if (!rejected.isEmpty()) {
             rejected(rejected);
+        }
+        int unfinished = point.schemes().size() - meeting.size() - rejected.size();
+        if (unfinished > 0) {
+            text.append("Not finished: ").append(unfinished).append(" schemes, neither met nor rejected\n\n");
         }
         text.append(String.format(
                 Locale.ROOT,

@@ -118,8 +118,8 @@ class RequirementReaderTest {
     @CsvSource(
             delimiter = '|',
             value = {
-                "name: Test link | '' | 2:1 | field 'name' is missing",
-                "bandwidthHz: 12500 | bandwidth: 12500 | 3:3 | field 'link.bandwidthHz' is missing",
+                "name: Test link | '' | 2:1 | field 'name' is missing; found here are link, payload, latencyS, decoderBudget, candidates",
+                "bandwidthHz: 12500 | bandwidth: 12500 | 3:3 | field 'link.bandwidthHz' is missing; found here are bandwidth, rollOff, bitRateBps, cOverN0DbHz, losses, modulations",
                 "bandwidthHz: 12500 | bandwidthHz: 12500\\n  speed: 3 | 4:3 | unknown field 'link.speed'; known here are bandwidthHz, rollOff, bitRateBps, cOverN0DbHz, availableEbn0Db, losses, modulations",
                 "bandwidthHz: 12500 | bandwidthHz: wide | 3:16 | link.bandwidthHz is 'wide', expected a number [Hz]",
                 "bandwidthHz: 12500 | bandwidthHz: -1 | 3:16 | bandwidthHz is -1.0, must be above 0 Hz",
@@ -132,7 +132,7 @@ class RequirementReaderTest {
                 "cOverN0DbHz: 42.5 | cOverN0DbHz: 42.5\\n  availableEbn0Db: 3 | 7:20 | link needs exactly one of cOverN0DbHz and availableEbn0Db, found both",
                 "'  cOverN0DbHz: 42.5\\n' | '' | 3:3 | link needs exactly one of cOverN0DbHz and availableEbn0Db, found neither",
                 "db: 0.5 | db: -0.5 | 8:25 | loss 'rain' is -0.5 dB, must be 0 .. 200 dB",
-                "db: 0.5 | dB: 0.5 | 8:7 | field 'link.losses[0].db' is missing",
+                "db: 0.5 | dB: 0.5 | 8:7 | field 'link.losses[0].db' is missing; found here are name, dB",
                 "qpsk] | 8psk] | 9:23 | unknown modulation '8psk'; known are bpsk, qpsk",
                 "bits: 320 | bits: 0 | 11:9 | bits is 0, must be 1 .. 1000000",
                 "bits: 320 | bits: 3.5 | 11:9 | payload.bits is '3.5', expected a whole number of bits",
@@ -146,6 +146,7 @@ class RequirementReaderTest {
                 "'code: golay:24,12' | 'family: goley' | 17:13 | unknown family 'goley'; known are repetition, parity-check, hamming, hamming-extended, golay, reed-muller, bch, bch-extended, ldpc-802.11n",
                 "'code: golay:24,12' | 'matrix: parity' | 17:5 | a candidate needs exactly one of 'code' and 'family', found neither",
                 "'[bounded-distance, maximum-likelihood]' | '[]' | 17:5 | field 'candidates[0].decoders' is missing or empty",
+                "'code: golay:24,12' | 'code: ./h.mtx' | 17:11 | ./h.mtx looks like a matrix file: add matrix: generator or matrix: parity",
                 "'[bounded-distance,' | '[guess,' | 18:16 | ",
                 "'code: golay:24,12' | 'code: ldpc-802.11n:648,1/2' | 18:16 | ",
                 "'code: golay:24,12' | 'code: h.mtx\\n    matrix: both' | 18:13 | matrix is 'both', expected generator or parity",

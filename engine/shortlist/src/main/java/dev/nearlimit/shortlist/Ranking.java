@@ -18,9 +18,11 @@ final class Ranking {
             .thenComparingDouble(row -> row.scheme().occupiedBandwidthHz())
             .thenComparingDouble(row -> row.scheme().operationsPerBit().worstCase());
 
-    /** Schemes whose needed Eb/N0 is known come first: only of them can be said how near they are. */
+    /** Schemes whose needed Eb/N0 is known come first: only of them can be said how near they are.
+     * Those that a cut-short run neither met nor rejected come last. */
     private static final Comparator<Row> NEAREST_FIRST = Comparator.comparing(
-                    (Row row) -> row.scheme().neededEbn0Db() == null)
+                    (Row row) -> row.scheme().fails().isEmpty())
+            .thenComparing(row -> row.scheme().neededEbn0Db() == null)
             .thenComparingInt(row -> row.scheme().fails().size())
             .thenComparingDouble(Row::missDb)
             .thenComparing(row -> row.scheme().neededEbn0Db(), Comparator.nullsLast(Comparator.naturalOrder()));

@@ -87,14 +87,22 @@ final class SchemeAssembler {
                 failures,
                 false,
                 false,
-                needed == null ? "dropped" : curve.stage(),
+                stage(standing, needed, failures),
                 note(standing, needed),
                 points(standing),
                 exactCurve(standing));
     }
 
+    private static String stage(Standing standing, Double needed, List<Failure> failures) {
+        if (needed != null) {
+            return standing.curve().stage();
+        }
+        return failures.isEmpty() ? "unfinished" : "dropped";
+    }
+
     private String note(Standing standing, Double needed) {
-        if (standing.curve() != null && !standing.curve().complete()) {
+        boolean untouched = standing.curve() == null && standing.note().isEmpty();
+        if (untouched || (standing.curve() != null && !standing.curve().complete())) {
             return "not finished: the run was cut short";
         }
         boolean marginUncertain = needed != null

@@ -52,7 +52,7 @@ import java.util.regex.Pattern;
  * @param tiedWithBest whether its interval overlaps the best scheme's
  * @param pareto whether no scheme that meets every demand is at least as good in Eb/N0, bandwidth, latency and
  *     operations and better in one
- * @param stage how far the search went: exact, refined, coarse, dropped
+ * @param stage how far the search went: exact, refined, coarse, dropped, or unfinished where the run was cut short
  * @param note why it was not taken further, for the reader
  * @param points simulated points, by ascending Eb/N0
  * @param exactCurve exact FER at some Eb/N0, null where none is known
