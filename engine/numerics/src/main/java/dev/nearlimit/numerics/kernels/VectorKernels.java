@@ -1,0 +1,10 @@
+package dev.nearlimit.numerics.kernels;
+
+/** The kernels that use the Vector API, in the width that this processor prefers. */
+final class VectorKernels {
+    private VectorKernels() {}
+
+    static KernelSet all() {
+        return new KernelSet(new VectorNoiseKernels());
+    }
+}
