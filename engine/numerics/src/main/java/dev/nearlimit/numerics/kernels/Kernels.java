@@ -1,5 +1,7 @@
 package dev.nearlimit.numerics.kernels;
 
+import java.util.Optional;
+
 /**
  * The kernels in use, chosen once when first asked for; which ones never changes a result. They are those of the Vector
  * API where the JVM was started with module {@code jdk.incubator.vector}, and plain Java where it was not or where the
@@ -22,6 +24,14 @@ public final class Kernels {
         return SET.noise();
     }
 
+    /**
+     * The kernels of layered fixed-point min-sum; empty in plain Java, where narrow lanes gain nothing and the decoder's
+     * own loops, with lanes of 32 bits, are what the JIT makes SIMD of.
+     */
+    public static Optional<LayeredMinSumKernels> layeredMinSum() {
+        return SET.layeredMinSum();
+    }
+
     /** What runs, for reports: {@code plain}, or {@code vector 256-bit} with the width of the registers in use. */
     public static String name() {
         return SET.noise().name();
@@ -33,7 +43,7 @@ public final class Kernels {
     }
 
     static KernelSet plain() {
-        return new KernelSet(new PlainNoiseKernels());
+        return new KernelSet(new PlainNoiseKernels(), Optional.empty());
     }
 
     private static KernelSet vector() {
