@@ -35,8 +35,11 @@ import org.openjdk.jmh.annotations.Warmup;
 public class LdpcDecoderBenchmark {
     static final int N = 1944;
 
-    @Param({"word=5,scale=6/8", "word=5,offset=1", "word=6,scale=6/8"})
-    public String words;
+    @Param({"5", "6"})
+    public int word;
+
+    @Param({"scale=6/8", "offset=1"})
+    public String correction;
 
     private final LlrBatch received = new LlrBatch(N);
     private final DecodedBatch decoded = new DecodedBatch(N);
@@ -45,7 +48,8 @@ public class LdpcDecoderBenchmark {
     @Setup
     public void prepare() {
         Code code = Catalogue.standard().build("ldpc-802.11n:" + N + ",1/2");
-        DecoderChoice choice = DecoderDesignator.parse("min-sum:iterations=10,early-stop=false," + words);
+        DecoderChoice choice =
+                DecoderDesignator.parse("min-sum:iterations=10,early-stop=false,word=" + word + "," + correction);
         decoder = choice.decoder().newDecoder(code, choice.quantiser());
         Random random = new Random(1);
         for (int i = 0; i < received.levels().length; i++) {

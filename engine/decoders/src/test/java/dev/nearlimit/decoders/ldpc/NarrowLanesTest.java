@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.sun.management.ThreadMXBean;
 import dev.nearlimit.codes.Code;
 import dev.nearlimit.codes.catalogue.Catalogue;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
@@ -12,6 +13,7 @@ import dev.nearlimit.decoders.RandomBatches;
 import dev.nearlimit.decoders.batch.DecodedBatch;
 import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.numerics.kernels.Kernels;
+import java.lang.management.ManagementFactory;
 import java.util.Optional;
 import java.util.Random;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -67,6 +69,34 @@ class NarrowLanesTest {
         assertEquals(bitsOfLane == 8 ? ByteLayeredMinSum.class : ShortLayeredMinSum.class, decoder.getClass());
         compare(code.parityCheck(), words, correction, EARLY, batch, "seed " + posterior);
         compare(code.parityCheck(), words, correction, ALL, batch, "seed " + posterior);
+    }
+
+    /** A call without kernels allocates nothing from the first on, one with vectors nothing once the JIT has done it. */
+    @ParameterizedTest
+    @CsvSource({"5, 7, true", "6, 8, true", "5, 7, false"})
+    void aCallAllocatesNothing(int message, int posterior, boolean vectors) {
+        WordLengths words = new WordLengths(message, posterior);
+        Code code = Catalogue.standard().build("hamming:15,11");
+        Decoder decoder = new MinSumSettings(ALL, new MagnitudeCorrection.Scale(6), Optional.of(words))
+                .fixedPoint(code.parityCheck(), words, vectors ? Kernels.layeredMinSum() : Optional.empty());
+        LlrBatch batch = new LlrBatch(code.n());
+        DecodedBatch decoded = new DecodedBatch(code.n());
+        decoder.decode(batch, decoded);
+        long deadline = System.nanoTime() + (vectors ? 60_000_000_000L : 0);
+        long allocated = ofCalls(decoder, batch, decoded);
+        while (allocated >= 100 * 16 && System.nanoTime() < deadline) {
+            allocated = ofCalls(decoder, batch, decoded);
+        }
+        assertTrue(allocated < 100 * 16, "100 calls allocated " + allocated + " bytes");
+    }
+
+    private static long ofCalls(Decoder decoder, LlrBatch batch, DecodedBatch decoded) {
+        ThreadMXBean thread = (ThreadMXBean) ManagementFactory.getThreadMXBean();
+        long before = thread.getThreadAllocatedBytes(Thread.currentThread().getId());
+        for (int i = 0; i < 100; i++) {
+            decoder.decode(batch, decoded);
+        }
+        return thread.getThreadAllocatedBytes(Thread.currentThread().getId()) - before;
     }
 
     private static void compare(
