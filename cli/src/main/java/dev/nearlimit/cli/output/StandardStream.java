@@ -29,8 +29,8 @@ public final class StandardStream implements AutoCloseable {
 
     /** Standard error: under the launcher's number for it where it keeps that of the JVM apart. */
     public static StandardStream error() {
-        return new StandardStream(InheritedDescriptor.named("nearlimit.error-descriptor")
-                .orElse(FileDescriptor.err));
+        return new StandardStream(
+                InheritedDescriptor.named("nearlimit.error-descriptor").orElse(FileDescriptor.err));
     }
 
     public PrintWriter writer() {
