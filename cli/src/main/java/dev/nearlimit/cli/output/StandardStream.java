@@ -27,8 +27,10 @@ public final class StandardStream implements AutoCloseable {
         return new StandardStream(FileDescriptor.out);
     }
 
+    /** Standard error: under the launcher's number for it where it keeps that of the JVM apart. */
     public static StandardStream error() {
-        return new StandardStream(FileDescriptor.err);
+        return new StandardStream(
+                InheritedDescriptor.named("nearlimit.error-descriptor").orElse(FileDescriptor.err));
     }
 
     public PrintWriter writer() {

@@ -8,6 +8,9 @@ import dev.nearlimit.decoders.DecoderSettings;
 import dev.nearlimit.decoders.InvalidDecoderException;
 import dev.nearlimit.decoders.OperationCount;
 import dev.nearlimit.decoders.Quantiser;
+import dev.nearlimit.numerics.kernels.Kernels;
+import dev.nearlimit.numerics.kernels.LayeredMinSumKernels;
+import dev.nearlimit.numerics.kernels.MinSumArithmetic;
 import java.util.Optional;
 
 /**
@@ -68,7 +71,22 @@ public record MinSumSettings(Iterations iterations, MagnitudeCorrection correcti
                     + words.get().posterior() + " bits, too short for levels up to " + quantiser.largestLevel()
                     + " of the quantiser");
         }
-        return new FixedPointBeliefPropagation(matrix, iterations, words.get(), correction);
+        return fixedPoint(matrix, words.get(), Kernels.layeredMinSum());
+    }
+
+    /** The fixed-point decoder on the given kernels, or without any; the results are the same. */
+    Decoder fixedPoint(SparseBitMatrix matrix, WordLengths words, Optional<LayeredMinSumKernels> kernels) {
+        if (iterations.schedule() != Schedule.LAYERED || kernels.isEmpty()) {
+            return new FixedPointBeliefPropagation(matrix, iterations, words, correction);
+        }
+        MinSumArithmetic arithmetic = new MinSumArithmetic(
+                words.largestMessage(),
+                words.largestPosterior(),
+                correction instanceof MagnitudeCorrection.Scale scale ? scale.eighths() : 8,
+                correction instanceof MagnitudeCorrection.Offset offset ? (int) offset.amount() : 0);
+        return arithmetic.fitsBytes()
+                ? new ByteLayeredMinSum(matrix, iterations, arithmetic, kernels.get())
+                : new ShortLayeredMinSum(matrix, iterations, arithmetic, kernels.get());
     }
 
     /**

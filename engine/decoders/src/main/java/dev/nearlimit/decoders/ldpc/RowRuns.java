@@ -1,6 +1,8 @@
 package dev.nearlimit.decoders.ldpc;
 
+import dev.nearlimit.codes.batch.FrameBatch;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
+import dev.nearlimit.numerics.kernels.CheckRun;
 import java.util.Arrays;
 
 /**
@@ -82,6 +84,21 @@ final class RowRuns {
 
     int count() {
         return count;
+    }
+
+    /** The runs as kernels take them; messages of one run after those of the other, edge by edge. */
+    CheckRun[] checkRuns() {
+        CheckRun[] result = new CheckRun[count];
+        int messages = 0;
+        for (int run = 0; run < count; run++) {
+            int[] bits = new int[degree[run]];
+            for (int i = 0; i < bits.length; i++) {
+                bits[i] = column(run, i) * FrameBatch.FRAMES;
+            }
+            result[run] = new CheckRun(bits, messages, rows[run] * FrameBatch.FRAMES);
+            messages += bits.length * result[run].lanes();
+        }
+        return result;
     }
 
     /** Rows of a run, 1 .. {@link #MOST_ROWS}. */

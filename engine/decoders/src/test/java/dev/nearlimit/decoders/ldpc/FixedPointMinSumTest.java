@@ -12,12 +12,17 @@ import dev.nearlimit.decoders.batch.DecodedBatch;
 import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.decoders.quantiser.Rise;
 import dev.nearlimit.decoders.quantiser.UniformQuantiser;
+import dev.nearlimit.numerics.kernels.Kernels;
+import java.util.List;
 import java.util.Optional;
 import java.util.Random;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
-/** The lane-parallel decoder and its twin agree to the bit: decisions, iterations and declared failures. */
+/**
+ * The lane-parallel decoder and its twin agree to the bit: decisions, iterations and declared failures; with and without
+ * kernels.
+ */
 class FixedPointMinSumTest {
     private static final MagnitudeCorrection[] CORRECTIONS = {
         new MagnitudeCorrection.Scale(6),
@@ -54,7 +59,10 @@ class FixedPointMinSumTest {
         UniformQuantiser quantiser = new UniformQuantiser(Math.min(words.posterior(), 8), 0.25f, Rise.MID_TREAD);
         Code code = Code.ofParityCheck("test", "test", matrix);
         MinSumSettings settings = new MinSumSettings(iterations, correction, Optional.of(words));
-        Decoder decoder = settings.newDecoder(code, quantiser);
+        List<Decoder> decoders = List.of(
+                settings.newDecoder(code, quantiser),
+                settings.fixedPoint(matrix, words, Optional.empty()),
+                settings.fixedPoint(matrix, words, Kernels.layeredMinSum()));
         SingleFrameMinSum twin = new SingleFrameMinSum(matrix, words, correction);
         LlrBatch batch = new LlrBatch(matrix.columns());
         int rail = quantiser.largestLevel();
@@ -68,18 +76,25 @@ class FixedPointMinSumTest {
                                     ? -rail
                                     : pick == 2 ? 0 : Math.round(0.7f * random.nextInt(rail + 1)) - pick / 6);
         }
-        DecodedBatch decoded = new DecodedBatch(matrix.columns());
-        decoder.decode(batch, decoded);
+        DecodedBatch[] decoded = new DecodedBatch[decoders.size()];
+        for (int i = 0; i < decoded.length; i++) {
+            decoded[i] = new DecodedBatch(matrix.columns());
+            decoders.get(i).decode(batch, decoded[i]);
+            decoders.get(i).decode(batch, decoded[i]); // a second batch sees nothing of the first
+        }
         for (int f = 0; f < FrameBatch.FRAMES; f++) {
             int[] channel = new int[matrix.columns()];
             for (int i = 0; i < channel.length; i++) {
                 channel[i] = batch.levels()[FrameBatch.softIndex(i, f)];
             }
             twin.decode(channel, iterations);
-            String where = seed + ", " + settings.designator() + ", frame " + f;
-            assertArrayEquals(twin.bits, RandomBatches.frame(decoded.bits(), f), where);
-            assertEquals(twin.iterations, decoded.iterations()[f], where);
-            assertEquals(twin.failed, (decoded.declaredFailures() >>> f & 1L) != 0, where);
+            for (int i = 0; i < decoded.length; i++) {
+                String where = seed + ", " + settings.designator() + ", frame " + f + ", "
+                        + decoders.get(i).getClass().getSimpleName();
+                assertArrayEquals(twin.bits, RandomBatches.frame(decoded[i].bits(), f), where);
+                assertEquals(twin.iterations, decoded[i].iterations()[f], where);
+                assertEquals(twin.failed, (decoded[i].declaredFailures() >>> f & 1L) != 0, where);
+            }
         }
     }
 }

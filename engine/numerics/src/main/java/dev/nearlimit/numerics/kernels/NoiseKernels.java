@@ -7,7 +7,7 @@ package dev.nearlimit.numerics.kernels;
  * <p>A 64-bit draw gives two samples (Box and Muller 1958): its high half a radius, its low half an angle.
  */
 public interface NoiseKernels {
-    /** The name by which a report says what ran: {@code plain}. */
+    /** The name by which a report says what ran: {@code plain}, or {@code vector 256-bit} with the registers' width. */
     String name();
 
     /**

@@ -1,0 +1,186 @@
+package dev.nearlimit.numerics.kernels;
+
+import static jdk.incubator.vector.VectorOperators.AND;
+import static jdk.incubator.vector.VectorOperators.ASHR;
+import static jdk.incubator.vector.VectorOperators.I2F;
+import static jdk.incubator.vector.VectorOperators.LSHL;
+import static jdk.incubator.vector.VectorOperators.LSHR;
+import static jdk.incubator.vector.VectorOperators.OR;
+import static jdk.incubator.vector.VectorOperators.ROL;
+import static jdk.incubator.vector.VectorOperators.XOR;
+
+import jdk.incubator.vector.FloatVector;
+import jdk.incubator.vector.IntVector;
+import jdk.incubator.vector.LongVector;
+import jdk.incubator.vector.VectorMask;
+import jdk.incubator.vector.VectorShuffle;
+import jdk.incubator.vector.VectorSpecies;
+
+/**
+ * The passes with the Vector API: the operations of {@link PlainNoiseKernels} and {@link Radius} in the same order, so
+ * that every bit is the same. A pass is a method of its own, since a long one falls past the limit of the JIT's inlining
+ * and boxes its vectors. A row of 64 lanes is a whole number of vectors of any width up to 2048 bits.
+ */
+final class VectorNoiseKernels implements NoiseKernels {
+    private static final VectorSpecies<Long> LONGS = LongVector.SPECIES_PREFERRED;
+    private static final VectorSpecies<Integer> INTS = IntVector.SPECIES_PREFERRED;
+    private static final VectorSpecies<Float> FLOATS = FloatVector.SPECIES_PREFERRED;
+    private static final int LANES = 64;
+    private static final float ANGLE_UNIT = (float) (Math.PI / 4 / 2147483648.0);
+    private static final int SIGN = 0x80000000;
+    private static final int SQRT_HALF_BITS = 0x3f3504f3;
+    private static final float LN_2 = 0.69314718056f;
+
+    private static final int HALF = INTS.length() / 2;
+    /** Even lanes to the lower half, odd lanes to the upper. */
+    private static final VectorShuffle<Integer> EVEN_ODD =
+            VectorShuffle.fromOp(INTS, i -> i < HALF ? 2 * i : 2 * (i - HALF) + 1);
+    /** Odd lanes to the lower half, even lanes to the upper. */
+    private static final VectorShuffle<Integer> ODD_EVEN =
+            VectorShuffle.fromOp(INTS, i -> i < HALF ? 2 * i + 1 : 2 * (i - HALF));
+
+    private static final VectorShuffle<Integer> EXCHANGE_HALVES =
+            VectorShuffle.fromOp(INTS, i -> (i + HALF) % (2 * HALF));
+    private static final VectorMask<Integer> UPPER = VectorMask.fromLong(INTS, -1L << HALF);
+
+    @Override
+    public String name() {
+        return "vector " + INTS.vectorBitSize() + "-bit";
+    }
+
+    @Override
+    public void fill(long[] state, long[] draws, int steps) {
+        for (int l = 0; l < LANES; l += LONGS.length()) {
+            fillLanes(state, draws, l, steps);
+        }
+    }
+
+    private static void fillLanes(long[] state, long[] draws, int l, int steps) {
+        LongVector s0 = LongVector.fromArray(LONGS, state, l);
+        LongVector s1 = LongVector.fromArray(LONGS, state, LANES + l);
+        LongVector s2 = LongVector.fromArray(LONGS, state, 2 * LANES + l);
+        LongVector s3 = LongVector.fromArray(LONGS, state, 3 * LANES + l);
+        for (int s = 0; s < steps; s++) {
+            s0.add(s3).lanewise(ROL, 23).add(s0).intoArray(draws, s * LANES + l);
+            LongVector t = s1.lanewise(LSHL, 17);
+            s2 = s2.lanewise(XOR, s0);
+            s3 = s3.lanewise(XOR, s1);
+            s1 = s1.lanewise(XOR, s2);
+            s0 = s0.lanewise(XOR, s3);
+            s2 = s2.lanewise(XOR, t);
+            s3 = s3.lanewise(ROL, 45);
+        }
+        s0.intoArray(state, l);
+        s1.intoArray(state, LANES + l);
+        s2.intoArray(state, 2 * LANES + l);
+        s3.intoArray(state, 3 * LANES + l);
+    }
+
+    @Override
+    public void split(long[] draws, int[] high, int[] low, int count) {
+        // Seen as ints the lower half of a long is the even lane, on processors of either byte order.
+        for (int i = 0; i < count; i += INTS.length()) {
+            IntVector a =
+                    LongVector.fromArray(LONGS, draws, i).reinterpretAsInts().rearrange(EVEN_ODD);
+            IntVector b = LongVector.fromArray(LONGS, draws, i + HALF)
+                    .reinterpretAsInts()
+                    .rearrange(ODD_EVEN);
+            a.blend(b, UPPER).intoArray(low, i);
+            b.blend(a, UPPER).rearrange(EXCHANGE_HALVES).intoArray(high, i);
+        }
+    }
+
+    @Override
+    public boolean anyInTail(int[] high, int count) {
+        IntVector signs = IntVector.zero(INTS);
+        for (int i = 0; i < count; i += INTS.length()) {
+            signs = signs.lanewise(
+                    OR, IntVector.fromArray(INTS, high, i).lanewise(LSHR, 7).sub(1));
+        }
+        return signs.reduceLanes(OR) < 0;
+    }
+
+    @Override
+    public void radius(int[] high, float[] radius, int count) {
+        for (int i = 0; i < count; i += INTS.length()) {
+            IntVector cell = IntVector.fromArray(INTS, high, i).lanewise(LSHR, 1);
+            FloatVector w = ((FloatVector) cell.convert(I2F, 0)).add(0.5f);
+            IntVector bits = w.viewAsIntegralLanes();
+            IntVector e = bits.sub(SQRT_HALF_BITS).lanewise(ASHR, 23);
+            FloatVector m = bits.sub(e.lanewise(LSHL, 23)).viewAsFloatingLanes().sub(1f);
+            FloatVector exponent = ((FloatVector) e.convert(I2F, 0)).sub(31f).mul(LN_2);
+            FloatVector z = m.mul(m);
+            FloatVector ln =
+                    logarithmPolynomial(m).mul(m).mul(z).sub(z.mul(0.5f)).add(m).add(exponent);
+            // As integers, floats below zero and -0 are below 0, so this is the maximum with +0 of plain Java.
+            ln.mul(-2f)
+                    .viewAsIntegralLanes()
+                    .max(0)
+                    .viewAsFloatingLanes()
+                    .sqrt()
+                    .intoArray(radius, i);
+        }
+    }
+
+    private static FloatVector logarithmPolynomial(FloatVector m) {
+        return m.mul(7.0376836292E-2f)
+                .add(-1.1514610310E-1f)
+                .mul(m)
+                .add(1.1676998740E-1f)
+                .mul(m)
+                .add(-1.2420140846E-1f)
+                .mul(m)
+                .add(1.4249322787E-1f)
+                .mul(m)
+                .add(-1.6668057665E-1f)
+                .mul(m)
+                .add(2.0000714765E-1f)
+                .mul(m)
+                .add(-2.4999993993E-1f)
+                .mul(m)
+                .add(3.3333331174E-1f);
+    }
+
+    @Override
+    public void rotate(int[] low, float[] radius, float[] samples, int count) {
+        for (int row = 0; row < count; row += LANES) {
+            rotateRow(low, radius, samples, row);
+        }
+    }
+
+    private static void rotateRow(int[] low, float[] radius, float[] samples, int row) {
+        for (int l = 0; l < LANES; l += INTS.length()) {
+            IntVector b = IntVector.fromArray(INTS, low, row + l);
+            FloatVector r = FloatVector.fromArray(FLOATS, radius, row + l);
+            FloatVector t = ((FloatVector) b.lanewise(LSHL, 2).convert(I2F, 0)).mul(ANGLE_UNIT);
+            FloatVector t2 = t.mul(t);
+            IntVector x = r.mul(cosine(t2)).viewAsIntegralLanes().lanewise(XOR, b.lanewise(AND, SIGN));
+            IntVector y = r.mul(sine(t, t2)).viewAsIntegralLanes();
+            IntVector exchange =
+                    x.lanewise(XOR, y).lanewise(AND, b.lanewise(LSHL, 1).lanewise(ASHR, 31));
+            x.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, 2 * row + l);
+            y.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, 2 * row + LANES + l);
+        }
+    }
+
+    private static FloatVector sine(FloatVector t, FloatVector t2) {
+        return t2.mul(-1.9515295891E-4f)
+                .add(8.3321608736E-3f)
+                .mul(t2)
+                .add(-1.6666654611E-1f)
+                .mul(t2)
+                .mul(t)
+                .add(t);
+    }
+
+    private static FloatVector cosine(FloatVector t2) {
+        return t2.mul(2.443315711809948E-5f)
+                .add(-1.388731625493765E-3f)
+                .mul(t2)
+                .add(4.166664568298827E-2f)
+                .mul(t2)
+                .mul(t2)
+                .sub(t2.mul(0.5f))
+                .add(1f);
+    }
+}
