@@ -45,6 +45,11 @@ public final class JournalCatalogue implements AutoCloseable {
         return new JournalCatalogue(JournalFile.openExisting(path), path);
     }
 
+    /** As {@link #open}, but makes the journal where there is none, to merge others into. */
+    public static JournalCatalogue make(Path path) {
+        return new JournalCatalogue(JournalFile.open(path), path);
+    }
+
     /** All jobs, the last changed last. */
     public List<KeptJob> jobs() {
         return jobs("");
