@@ -46,6 +46,32 @@ final class PointRun {
         this.blocksAtMost = (rule.maxFrames() - 1) / bench.framesPerBlock() + 1;
     }
 
+    /**
+     * Counts the blocks that the journal has from the first one on. Called before any thread works, so that a point that
+     * needs nothing more makes no thread run ahead.
+     */
+    void countKept() {
+        for (long block = handOut(); block >= 0; block = handOut()) {
+            Optional<byte[]> kept = journal.find(job, block);
+            if (kept.isEmpty()) {
+                handBack();
+                return;
+            }
+            tally.found(job, block);
+            count(block, Block.fromBytes(kept.get()));
+        }
+    }
+
+    /** Takes back the number handed out last. */
+    private synchronized void handBack() {
+        nextToHandOut--;
+    }
+
+    /** Whether nothing is left to do. */
+    synchronized boolean met() {
+        return counter.met();
+    }
+
     /** Works until the run ends; what goes wrong is kept for {@link #counts()}. */
     void work() {
         try {

@@ -86,6 +86,10 @@ public final class Simulator {
         ContentHash job = bench.jobKey(point, seed);
         journal.describe(job, bench.description(point, seed));
         PointRun run = new PointRun(bench, streams, journal, job, rule, control, tally);
+        run.countKept();
+        if (run.met()) {
+            return run.counts();
+        }
         List<Future<?>> started = new ArrayList<>();
         for (int t = 1; t < threads; t++) {
             started.add(helpers.submit(run::work));

@@ -48,6 +48,20 @@ final class JournalledRunTest {
         }
     }
 
+    /** A rule on errors ends within a block: threads that find it met do not run ahead once more. */
+    @Test
+    void aFinishedPointComputesNothing() {
+        StoppingRule rule = new StoppingRule(1_000_000, 20);
+        try (SqliteJournal journal = journal()) {
+            PointCounts counts = run(new Simulator(2, journal, 64), rule);
+            for (int i = 0; i < 20; i++) {
+                Simulator again = new Simulator(4, journal, 64);
+                assertEquals(counts, run(again, rule));
+                assertEquals(0, again.blocks().computed());
+            }
+        }
+    }
+
     @Test
     void theFileSaysWhatItKeepsAndCanBeCountedAgain() {
         PointCounts counts;
