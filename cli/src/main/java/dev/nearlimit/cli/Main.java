@@ -2,8 +2,10 @@ package dev.nearlimit.cli;
 
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
+import dev.nearlimit.cli.journal.DefaultJournal;
 import dev.nearlimit.cli.output.StandardStream;
 import java.io.PrintWriter;
+import java.util.Optional;
 
 /** Starts the tool. */
 public final class Main {
@@ -23,7 +25,8 @@ public final class Main {
     }
 
     private static int run(String[] args, StandardStream out, StandardStream err, Interruption interruption) {
-        Session session = new Session(Boolean.getBoolean("nearlimit.terminal"), interruption);
+        Session session = new Session(
+                Boolean.getBoolean("nearlimit.terminal"), interruption, Optional.of(DefaultJournal.location()));
         PrintWriter errors = err.writer();
         int code;
         try {

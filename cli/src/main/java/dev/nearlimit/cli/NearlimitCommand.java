@@ -7,6 +7,7 @@ import dev.nearlimit.cli.command.SimulateCommand;
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
 import dev.nearlimit.cli.failure.ParseFailure;
+import dev.nearlimit.cli.journal.RunsCommand;
 import dev.nearlimit.cli.shortlist.ShortlistCommand;
 import java.io.PrintWriter;
 import java.util.List;
@@ -54,6 +55,7 @@ public final class NearlimitCommand implements Runnable {
                 new CodesCommand(),
                 new InspectCommand(session),
                 new SimulateCommand(session),
+                new RunsCommand(session),
                 new LimitCommand());
     }
 

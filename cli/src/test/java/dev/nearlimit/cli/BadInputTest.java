@@ -60,6 +60,14 @@ final class BadInputTest {
                 "simulate hamming:7,4 --decoder syndrome --ebn0 0:0.001:9 | '0:0.001:9' gives more than 1000 values of Eb/N0",
                 "simulate hamming:7,4 --decoder syndrome --ebn0 200 | Eb/N0 is 200 dB; expected -100 to 100",
                 "simulate hamming:7,4 --decoder syndrome --ebn0 1 --frames 0 | frames is 0, must be at least 1",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 1 --journal a --no-journal | --journal and --no-journal exclude each other",
+                "simulate hamming:7,4 --decoder syndrome --ebn0 1 --journal ./none/a | ./none/a: the journal's folder does not exist",
+                "runs | there is no usual journal; --journal names one",
+                "runs --journal ./none | ./none: no such file, a journal was expected",
+                "runs --journal . | .: is a folder, a journal file was expected",
+                "runs --journal pom.xml | pom.xml: is no journal: the file is not an SQLite database",
+                "runs 3f --forget 3f --journal a | ID, --merge and --forget exclude each other",
+                "runs 3f 40 | unknown argument '40' (see nearlimit runs --help)",
                 "simulate hamming:7,4 --decoder syndrome --ebn0 1 --time-limit 5 | time limit is '5'; expected such as 90s, 5m or 2h",
             })
     void isRefusedInOneLine(String commandLine, String message) {

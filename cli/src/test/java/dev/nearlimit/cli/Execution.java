@@ -15,10 +15,14 @@ public record Execution(int exitCode, String out, String err) {
 
     /** Runs with an interruption that a test may request. */
     public static Execution of(Interruption interruption, String... args) {
+        return of(new Session(false, interruption), args);
+    }
+
+    /** Runs in given surroundings; the others have no journal, so that no test touches the user's. */
+    public static Execution of(Session session, String... args) {
         StringWriter out = new StringWriter();
         StringWriter err = new StringWriter();
-        int code = NearlimitCommand.commandLine(
-                        new Session(false, interruption), new PrintWriter(out), new PrintWriter(err))
+        int code = NearlimitCommand.commandLine(session, new PrintWriter(out), new PrintWriter(err))
                 .execute(args);
         return new Execution(code, out.toString(), err.toString());
     }

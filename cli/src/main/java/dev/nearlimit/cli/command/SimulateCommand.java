@@ -6,12 +6,14 @@ import dev.nearlimit.cli.failure.InputException;
 import dev.nearlimit.cli.input.Ebn0List;
 import dev.nearlimit.cli.input.ThreadsOption;
 import dev.nearlimit.cli.input.TimeLimit;
+import dev.nearlimit.cli.journal.JournalOptions;
+import dev.nearlimit.cli.journal.RunJournal;
 import dev.nearlimit.cli.output.OutputOptions;
 import dev.nearlimit.cli.progress.Progress;
 import dev.nearlimit.codes.Code;
 import dev.nearlimit.decoders.catalogue.DecoderChoice;
 import dev.nearlimit.decoders.catalogue.DecoderDesignator;
-import dev.nearlimit.journal.MemoryJournal;
+import dev.nearlimit.journal.NoJournal;
 import dev.nearlimit.limits.Modulation;
 import dev.nearlimit.simulation.Channel;
 import dev.nearlimit.simulation.Point;
@@ -37,7 +39,9 @@ import picocli.CommandLine.Spec;
             "            --modulation qpsk --ebn0 1:0.25:2.5",
             "  nearlimit simulate golay:23,12 --decoder syndrome --channel bsc:0.01",
             "Every rate stands beside its 95 %% interval. Counts depend on code, decoder,",
-            "channel, Eb/N0, seed and stopping rule alone: not on threads, machine or time."
+            "channel, Eb/N0, seed and stopping rule alone: not on threads, machine or time.",
+            "The same command goes on where a run was cut off; nearlimit runs lists what is",
+            "kept."
         })
 public final class SimulateCommand implements Callable<Integer> {
     private final Session session;
@@ -110,6 +114,9 @@ public final class SimulateCommand implements Callable<Integer> {
     private ThreadsOption threads;
 
     @Mixin
+    private JournalOptions journal;
+
+    @Mixin
     private OutputOptions output;
 
     public SimulateCommand(Session session) {
@@ -125,15 +132,22 @@ public final class SimulateCommand implements Callable<Integer> {
         Modulation over = Modulation.of(modulation);
         Code code = argument.code();
         Scheme scheme = new Scheme(code, choice.decoder(), over, choice.quantiser(), overChannel);
-        SimulationRun run = new SimulationRun(
-                new Simulator(threads.count(), new MemoryJournal()), scheme, seed, rule, session.interruption());
+        int workers = threads.count();
+        // Each point is run once, so that without a file nothing needs to be kept.
+        RunJournal kept = journal.open(session, new NoJournal());
         SimulationReport report;
-        try (Progress progress =
-                Progress.start(session.terminal(), spec.commandLine().getErr(), "simulating")) {
-            report = run.measure(points, timeLimit, progress);
+        try (kept;
+                Progress progress =
+                        Progress.start(session.terminal(), spec.commandLine().getErr(), "simulating")) {
+            SimulationRun run = new SimulationRun(
+                    new Simulator(workers, kept.journal()), scheme, seed, rule, session.interruption());
+            report = run.measure(points, timeLimit, kept.isFile(), progress);
         }
         output.show(report);
-        return session.interruption().requested() ? ExitCode.INTERRUPTED : ExitCode.OK;
+        if (session.interruption().requested()) {
+            return ExitCode.INTERRUPTED;
+        }
+        return kept.failed() ? ExitCode.TOOL_FAILED : ExitCode.OK;
     }
 
     private List<Point> points(Channel overChannel) {

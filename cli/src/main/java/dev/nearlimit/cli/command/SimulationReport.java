@@ -8,6 +8,7 @@ import dev.nearlimit.cli.output.Numbers;
 import dev.nearlimit.cli.output.Presentation;
 import dev.nearlimit.cli.output.PropertyList;
 import dev.nearlimit.cli.output.TextTable;
+import dev.nearlimit.simulation.BlockOrigins;
 import dev.nearlimit.simulation.PointCounts;
 import dev.nearlimit.simulation.Scheme;
 import dev.nearlimit.simulation.StoppingRule;
@@ -28,8 +29,10 @@ record SimulationReport(
      * What the run cost; depends on the machine, and so stands apart from the results.
      *
      * @param kernel which kernels did the arithmetic
+     * @param blocks where the blocks of frames came from
+     * @param kept whether blocks are kept in a journal that outlives the run
      */
-    record Performance(String kernel, int threads, double elapsedS) {}
+    record Performance(String kernel, int threads, double elapsedS, BlockOrigins blocks, boolean kept) {}
 
     @Override
     public String table() {
@@ -103,12 +106,19 @@ record SimulationReport(
         String line = "Took " + Numbers.duration(performance.elapsedS()) + " on " + performance.threads()
                 + (performance.threads() == 1 ? " thread (" : " threads (")
                 + performance.kernel() + " kernels): " + Numbers.engineering(framesPerS()) + " frames/s, "
-                + Numbers.fixed(codedMbPerS(), codedMbPerS() < 10 ? 2 : 0) + " Mb/s of code bits.";
+                + Numbers.fixed(codedMbPerS(), codedMbPerS() < 10 ? 2 : 0) + " Mb/s of code bits."
+                + (performance.kept() ? " " + fromJournal(performance.blocks()) : "");
         return String.join("\n", TextTable.wrap(line, TextTable.WIDTH)) + "\n";
     }
 
+    private static String fromJournal(BlockOrigins blocks) {
+        return "Of " + (blocks.found() + blocks.computed()) + " blocks of frames " + blocks.found()
+                + " came from the journal.";
+    }
+
+    /** Of the frames that were computed: what the journal had says nothing about this machine. */
     private double framesPerS() {
-        return points.stream().mapToLong(point -> point.counts().frames()).sum() / performance.elapsedS();
+        return performance.blocks().framesComputed() / performance.elapsedS();
     }
 
     private double codedMbPerS() {
@@ -169,6 +179,8 @@ record SimulationReport(
         JsonText.put(cost, "codedMbPerS", codedMbPerS());
         JsonText.put(cost, "framesPerS", framesPerS());
         JsonText.put(cost, "elapsedS", performance.elapsedS());
+        cost.put("blocksComputed", performance.blocks().computed());
+        cost.put("blocksFromJournal", performance.blocks().found());
         return root;
     }
 

@@ -32,8 +32,13 @@ final class SimulationRun {
         this.interruption = interruption;
     }
 
-    /** @param timeLimit for all points together; null for none */
-    SimulationReport measure(List<Point> points, TimeLimit timeLimit, Progress progress) {
+    /**
+     * Measures the points.
+     *
+     * @param timeLimit for all points together; null for none
+     * @param kept whether blocks are kept in a journal that outlives the run
+     */
+    SimulationReport measure(List<Point> points, TimeLimit timeLimit, boolean kept, Progress progress) {
         long start = System.nanoTime();
         RunControl control = RunControl.none().withCancellation(interruption::requested);
         if (timeLimit != null) {
@@ -57,7 +62,8 @@ final class SimulationRun {
                 rule,
                 measured,
                 points.size(),
-                new SimulationReport.Performance(Kernels.name(), simulator.threads(), elapsedS));
+                new SimulationReport.Performance(
+                        Kernels.name(), simulator.threads(), elapsedS, simulator.blocks(), kept));
     }
 
     private PointCounts measure(List<Point> points, int index, RunControl control, Progress progress) {

@@ -6,6 +6,7 @@ import dev.nearlimit.cli.ExitCode;
 import dev.nearlimit.codes.InvalidCodeException;
 import dev.nearlimit.codes.matrix.MatrixFormatException;
 import dev.nearlimit.decoders.InvalidDecoderException;
+import dev.nearlimit.journal.JournalException;
 import dev.nearlimit.limits.InvalidLimitException;
 import dev.nearlimit.shortlist.requirement.InvalidRequirementException;
 import dev.nearlimit.simulation.InvalidSimulationException;
@@ -45,6 +46,9 @@ public record Failure(String message, String file, int line, int column, int exi
         if (e instanceof MatrixFormatException matrix) {
             String message = "found " + matrix.found() + ", expected " + matrix.expected();
             return new Failure(message, matrix.file(), matrix.line(), matrix.column(), ExitCode.BAD_INPUT);
+        }
+        if (e instanceof JournalException journal) {
+            return new Failure(journal.getMessage(), journal.file(), 0, 0, ExitCode.BAD_INPUT);
         }
         if (e instanceof CancellationException) {
             return new Failure("interrupted", null, 0, 0, ExitCode.INTERRUPTED);

@@ -5,6 +5,8 @@ import dev.nearlimit.cli.ExitCode;
 import dev.nearlimit.cli.Session;
 import dev.nearlimit.cli.failure.InputException;
 import dev.nearlimit.cli.input.ThreadsOption;
+import dev.nearlimit.cli.journal.JournalOptions;
+import dev.nearlimit.cli.journal.RunJournal;
 import dev.nearlimit.cli.output.JsonText;
 import dev.nearlimit.cli.output.OutputFile;
 import dev.nearlimit.cli.output.OutputFormat;
@@ -39,7 +41,7 @@ import picocli.CommandLine.Spec;
             "  nearlimit shortlist cli/examples/harbour-buoy.yaml --out results",
             "prints the shortlist and writes report.html, shortlist.csv and shortlist.json to",
             "the folder results. A requirement that nothing meets is answered with what comes",
-            "closest, and exit code 0."
+            "closest, and exit code 0. The same command goes on where a run was cut off."
         })
 public final class ShortlistCommand implements Callable<Integer> {
     private static final String RESULTS = "shortlist.json";
@@ -83,6 +85,9 @@ public final class ShortlistCommand implements Callable<Integer> {
     @Mixin
     private ThreadsOption threads;
 
+    @Mixin
+    private JournalOptions journal;
+
     public ShortlistCommand(Session session) {
         this.session = session;
     }
@@ -92,26 +97,38 @@ public final class ShortlistCommand implements Callable<Integer> {
         Requirement requirement = RequirementReader.read(file);
         requireFolder();
         long start = System.nanoTime();
-        ShortlistResult result = shortlist(requirement);
+        int workers = threads.count();
+        // A search comes back to points: without a file, their blocks are kept while the run lasts.
+        RunJournal kept = journal.open(session, new MemoryJournal());
+        Simulator simulator = new Simulator(workers, kept.journal());
+        ShortlistResult result;
+        try (kept) {
+            result = shortlist(requirement, simulator);
+        }
         double elapsedS = (System.nanoTime() - start) / 1e9;
         ShortlistRun run = new ShortlistRun(
                 requirement,
                 result,
                 file.toString(),
                 "nearlimit shortlist " + file + " --seed " + seed,
-                threads.count(),
-                elapsedS);
+                workers,
+                elapsedS,
+                simulator.blocks(),
+                kept.isFile());
         ShortlistReport report = new ShortlistReport(run, all);
         write(report);
-        return result.complete() ? ExitCode.OK : ExitCode.INTERRUPTED;
+        if (!result.complete()) {
+            return ExitCode.INTERRUPTED;
+        }
+        return kept.failed() ? ExitCode.TOOL_FAILED : ExitCode.OK;
     }
 
-    private ShortlistResult shortlist(Requirement requirement) {
+    private ShortlistResult shortlist(Requirement requirement, Simulator simulator) {
         try (Progress progress =
                 Progress.start(session.terminal(), spec.commandLine().getErr(), "shortlist")) {
             ProgressLine line = new ProgressLine(progress);
             SimulatedMeters meters = new SimulatedMeters(
-                    new Simulator(threads.count(), new MemoryJournal()),
+                    simulator,
                     seed,
                     RunControl.none()
                             .withCancellation(session.interruption()::requested)

@@ -36,6 +36,8 @@ final class ShortlistJson {
         performance.put("threads", run.threads());
         JsonText.put(performance, "elapsedS", run.elapsedS());
         performance.put("framesSimulated", run.result().framesSimulated());
+        performance.put("blocksComputed", run.blocks().computed());
+        performance.put("blocksFromJournal", run.blocks().found());
         return root;
     }
 

@@ -66,6 +66,14 @@ final class ShortlistTable {
                 run.threads(),
                 run.threads() == 1 ? "thread" : "threads",
                 Numbers.duration(run.elapsedS())));
+        if (run.kept()) {
+            long blocks = run.blocks().computed() + run.blocks().found();
+            text.append(String.format(
+                    Locale.ROOT,
+                    "%d of %d blocks of frames came from the journal%n",
+                    run.blocks().found(),
+                    blocks));
+        }
     }
 
     private void budget(OperatingPoint point) {

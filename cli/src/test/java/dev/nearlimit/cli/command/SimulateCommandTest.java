@@ -49,7 +49,14 @@ final class SimulateCommandTest {
                         "complete"),
                 names(result.get("points").get(0)));
         assertEquals(
-                List.of("kernel", "threads", "codedMbPerS", "framesPerS", "elapsedS"),
+                List.of(
+                        "kernel",
+                        "threads",
+                        "codedMbPerS",
+                        "framesPerS",
+                        "elapsedS",
+                        "blocksComputed",
+                        "blocksFromJournal"),
                 names(result.get("performance")));
     }
 

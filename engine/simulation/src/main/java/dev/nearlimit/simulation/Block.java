@@ -16,7 +16,8 @@ import java.util.Arrays;
  * @param iterations iterations of every frame, or empty for a decoder that does not iterate
  */
 record Block(int frames, int[] failed, int[] bitErrors, boolean[] undetected, int[] iterations) {
-    private static final byte FORMAT = 1;
+    /** How blocks are written; part of a block's key, so that a block of another format is never found. */
+    static final byte FORMAT = 1;
 
     /** Frame errors among the first so many frames. */
     int failedBefore(int limit) {

@@ -7,7 +7,6 @@ import dev.nearlimit.simulation.link.Payload;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
-import java.util.concurrent.atomic.AtomicLong;
 
 /**
  * One run of one point, shared by its threads: hands out block numbers in order, takes finished blocks in any order and
@@ -19,7 +18,7 @@ final class PointRun {
     private final Journal journal;
     private final ContentHash job;
     private final RunControl control;
-    private final AtomicLong blocksComputed;
+    private final BlockTally tally;
     private final long blocksAtMost;
 
     private final PrefixCounter counter;
@@ -36,15 +35,41 @@ final class PointRun {
             ContentHash job,
             StoppingRule rule,
             RunControl control,
-            AtomicLong blocksComputed) {
+            BlockTally tally) {
         this.bench = bench;
         this.streams = streams;
         this.journal = journal;
         this.job = job;
         this.counter = new PrefixCounter(rule);
         this.control = control;
-        this.blocksComputed = blocksComputed;
+        this.tally = tally;
         this.blocksAtMost = (rule.maxFrames() - 1) / bench.framesPerBlock() + 1;
+    }
+
+    /**
+     * Counts the blocks that the journal has from the first one on. Called before any thread works, so that a point that
+     * needs nothing more makes no thread run ahead.
+     */
+    void countKept() {
+        for (long block = handOut(); block >= 0; block = handOut()) {
+            Optional<byte[]> kept = journal.find(job, block);
+            if (kept.isEmpty()) {
+                handBack();
+                return;
+            }
+            tally.found(job, block);
+            count(block, Block.fromBytes(kept.get()));
+        }
+    }
+
+    /** Takes back the number handed out last. */
+    private synchronized void handBack() {
+        nextToHandOut--;
+    }
+
+    /** Whether nothing is left to do. */
+    synchronized boolean met() {
+        return counter.met();
     }
 
     /** Works until the run ends; what goes wrong is kept for {@link #counts()}. */
@@ -79,12 +104,13 @@ final class PointRun {
         Optional<Block> findOrCompute(long number) {
             Optional<byte[]> kept = journal.find(job, number);
             if (kept.isPresent()) {
+                tally.found(job, number);
                 return Optional.of(Block.fromBytes(kept.get()));
             }
             Optional<Block> block = worker.compute(number, payload, link, control);
             if (block.isPresent()) {
                 journal.keep(job, number, block.get().toBytes());
-                blocksComputed.incrementAndGet();
+                tally.computed(job, number, bench.framesPerBlock());
             }
             return block;
         }

@@ -5,6 +5,7 @@ import dev.nearlimit.codes.batch.FrameBatch;
 import dev.nearlimit.codes.structure.BchStructure;
 import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.journal.ContentHash;
+import dev.nearlimit.journal.JobDescription;
 import dev.nearlimit.numerics.noise.GaussianNoise;
 import dev.nearlimit.numerics.random.FrameStreams;
 import dev.nearlimit.simulation.link.Link;
@@ -78,7 +79,24 @@ final class SchemeBench {
                 .add("point", point.toString())
                 .add("seed", seed)
                 .add("frames per block", framesPerBlock)
+                .add("block format", Block.FORMAT)
                 .build();
+    }
+
+    /** What a job is, for whoever lists the journal: designators, sizes [bit], Eb/N0 [dB] where there is one, seed. */
+    JobDescription description(Point point, long seed) {
+        JobDescription description = JobDescription.NONE
+                .with("code", scheme.code().designator())
+                .with("n", String.valueOf(scheme.code().n()))
+                .with("k", String.valueOf(scheme.code().k()))
+                .with("decoder", scheme.decoder().designator())
+                .with("quantiser", scheme.quantiser().designator())
+                .with("modulation", scheme.modulation().designator())
+                .with("channel", scheme.channel().designator());
+        if (point.ebn0MicroDb().isPresent()) {
+            description = description.with("ebn0Db", String.valueOf(point.ebn0Db()));
+        }
+        return description.with("seed", String.valueOf(seed)).with("framesPerBlock", String.valueOf(framesPerBlock));
     }
 
     private static ContentHash hash(Scheme scheme) {

@@ -1,6 +1,7 @@
 package dev.nearlimit.simulation;
 
 import dev.nearlimit.codes.batch.FrameBatch;
+import dev.nearlimit.journal.ContentHash;
 import dev.nearlimit.journal.Journal;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -10,7 +11,6 @@ import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
-import java.util.concurrent.atomic.AtomicLong;
 
 /**
  * Measures schemes point by point on several threads.
@@ -27,7 +27,7 @@ public final class Simulator {
     private final int threads;
     private final Journal journal;
     private final int framesPerBlock;
-    private final AtomicLong blocksComputed = new AtomicLong();
+    private final BlockTally tally = new BlockTally();
     private final ExecutorService helpers = Executors.newCachedThreadPool(task -> {
         Thread thread = new Thread(task, "simulation");
         thread.setDaemon(true);
@@ -83,7 +83,13 @@ public final class Simulator {
     public PointCounts run(Scheme scheme, Point point, long seed, StoppingRule rule, RunControl control) {
         PointStreams streams = new PointStreams(scheme, point, seed);
         SchemeBench bench = bench(scheme);
-        PointRun run = new PointRun(bench, streams, journal, bench.jobKey(point, seed), rule, control, blocksComputed);
+        ContentHash job = bench.jobKey(point, seed);
+        journal.describe(job, bench.description(point, seed));
+        PointRun run = new PointRun(bench, streams, journal, job, rule, control, tally);
+        run.countKept();
+        if (run.met()) {
+            return run.counts();
+        }
         List<Future<?>> started = new ArrayList<>();
         for (int t = 1; t < threads; t++) {
             started.add(helpers.submit(run::work));
@@ -93,9 +99,9 @@ public final class Simulator {
         return run.counts();
     }
 
-    /** Blocks that this simulator computed rather than found, over all its runs. */
-    public long blocksComputed() {
-        return blocksComputed.get();
+    /** Where the blocks came from, over all runs so far. */
+    public BlockOrigins blocks() {
+        return tally.origins();
     }
 
     /** Threads that work on a point. */

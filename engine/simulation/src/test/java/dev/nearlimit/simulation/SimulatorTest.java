@@ -64,13 +64,13 @@ class SimulatorTest {
         StoppingRule tight = new StoppingRule(6400, 1_000_000);
         Simulator first = new Simulator(1, journal, 64);
         PointCounts early = first.run(SCHEME, POINT, 1, loose, RunControl.none());
-        assertEquals(10, first.blocksComputed());
+        assertEquals(10, first.blocks().computed());
         assertEquals(early, first.run(SCHEME, POINT, 1, loose, RunControl.none()));
-        assertEquals(10, first.blocksComputed());
+        assertEquals(10, first.blocks().computed());
 
         Simulator second = new Simulator(2, journal, 64);
         PointCounts late = second.run(SCHEME, POINT, 1, tight, RunControl.none());
-        assertEquals(90, second.blocksComputed());
+        assertEquals(90, second.blocks().computed());
         assertEquals(new Simulator(1, new MemoryJournal()).run(SCHEME, POINT, 1, tight, RunControl.none()), late);
     }
 
@@ -90,7 +90,7 @@ class SimulatorTest {
                         .frameErrors(),
                 part.frameErrors());
         PointCounts whole = simulator.run(SCHEME, POINT, 1, rule, RunControl.none());
-        assertEquals(100, simulator.blocksComputed());
+        assertEquals(100, simulator.blocks().computed());
         assertEquals(new Simulator(2, new MemoryJournal()).run(SCHEME, POINT, 1, rule, RunControl.none()), whole);
     }
 
@@ -163,7 +163,7 @@ class SimulatorTest {
                 1,
                 rule,
                 RunControl.none());
-        assertEquals(2, simulator.blocksComputed());
+        assertEquals(2, simulator.blocks().computed());
     }
 
     @Test
