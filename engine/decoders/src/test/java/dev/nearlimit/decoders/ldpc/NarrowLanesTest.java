@@ -16,6 +16,7 @@ import dev.nearlimit.numerics.kernels.Kernels;
 import java.lang.management.ManagementFactory;
 import java.util.Optional;
 import java.util.Random;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -71,22 +72,20 @@ class NarrowLanesTest {
         compare(code.parityCheck(), words, correction, ALL, batch, "seed " + posterior);
     }
 
-    /** A call without kernels allocates nothing from the first on, one with vectors nothing once the JIT has done it. */
-    @ParameterizedTest
-    @CsvSource({"5, 7, true", "6, 8, true", "5, 7, false"})
-    void aCallAllocatesNothing(int message, int posterior, boolean vectors) {
-        WordLengths words = new WordLengths(message, posterior);
+    /**
+     * The plain loops allocate nothing from the first call on. Of the vector ones no test can say so: whether the JIT keeps
+     * its vectors in registers depends on what else it has compiled, and is measured by the benchmarks ({@code -prof gc}).
+     */
+    @Test
+    void aCallOfThePlainLoopsAllocatesNothing() {
+        WordLengths words = new WordLengths(5, 7);
         Code code = Catalogue.standard().build("hamming:15,11");
         Decoder decoder = new MinSumSettings(ALL, new MagnitudeCorrection.Scale(6), Optional.of(words))
-                .fixedPoint(code.parityCheck(), words, vectors ? Kernels.layeredMinSum() : Optional.empty());
+                .fixedPoint(code.parityCheck(), words, Optional.empty());
         LlrBatch batch = new LlrBatch(code.n());
         DecodedBatch decoded = new DecodedBatch(code.n());
         decoder.decode(batch, decoded);
-        long deadline = System.nanoTime() + (vectors ? 60_000_000_000L : 0);
         long allocated = ofCalls(decoder, batch, decoded);
-        while (allocated >= 100 * 16 && System.nanoTime() < deadline) {
-            allocated = ofCalls(decoder, batch, decoded);
-        }
         assertTrue(allocated < 100 * 16, "100 calls allocated " + allocated + " bytes");
     }
 
