@@ -152,7 +152,7 @@ public final class ShortlistCommand implements Callable<Integer> {
         ObjectNode json = report.json();
         OutputFile.write(folder.resolve(RESULTS), JsonText.of(json));
         OutputFile.write(folder.resolve(CSV), report.csv().toString());
-        OutputFile.write(folder.resolve(REPORT), HtmlReport.render(json));
+        HtmlReport.write(json, folder.resolve(REPORT));
         PrintWriter out = spec.commandLine().getOut();
         switch (format) {
             case TABLE -> {

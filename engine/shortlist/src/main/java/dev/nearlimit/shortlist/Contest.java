@@ -120,14 +120,17 @@ final class Contest {
         if (!standing.curve().complete()) {
             return;
         }
+        String where = "at";
         if (!standing.curve().found() && !standing.search().missesForSure(standing.curve())) {
             bracket(standing, reachDb + BEYOND_REACH_DB);
+            where = "beyond";
         }
         if (standing.curve().complete() && !standing.curve().found()) {
             standing.drop(String.format(
                     Locale.ROOT,
-                    "dropped after %d frame errors at the available Eb/N0",
-                    standing.curve().nearNeeded().counts().frameErrors()));
+                    "dropped after %d frame errors %s the available Eb/N0",
+                    standing.curve().nearNeeded().counts().frameErrors(),
+                    where));
         }
     }
 
