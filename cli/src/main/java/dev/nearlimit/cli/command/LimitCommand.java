@@ -3,8 +3,10 @@ package dev.nearlimit.cli.command;
 import dev.nearlimit.cli.failure.InputException;
 import dev.nearlimit.cli.input.Fraction;
 import dev.nearlimit.cli.output.OutputOptions;
+import dev.nearlimit.limits.Limit;
 import dev.nearlimit.limits.LimitTable;
 import dev.nearlimit.limits.Modulation;
+import java.util.List;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.concurrent.Callable;
@@ -20,8 +22,10 @@ import picocli.CommandLine.Option;
             "%nExamples:",
             "  nearlimit limit --rate 1/2",
             "  nearlimit limit --length 648 --information 324 --fer 1e-3 --ber 1e-5",
+            "  nearlimit limit --rate 1/2 --word 4 --step 1",
             "The first shows the limits of unlimited length; the second adds what 324 bits in",
-            "648 channel uses can reach, and what uncoded transmission needs at BER 1e-5."
+            "648 channel uses can reach, and what uncoded transmission needs at BER 1e-5; the",
+            "third what a step of 1 costs a 4-bit quantiser of LLRs beside its best step."
         })
 public final class LimitCommand implements Callable<Integer> {
     @Option(
@@ -60,12 +64,17 @@ public final class LimitCommand implements Callable<Integer> {
     private Fraction ber;
 
     @Mixin
+    private QuantiserOptions quantiser;
+
+    @Mixin
     private OutputOptions output;
 
     @Override
     public Integer call() {
-        output.show(new LimitReport(LimitTable.atRate(
-                ratePerDimension(), Modulation.of(modulation), of(length), of(information), of(fer), of(ber))));
+        double perDimension = ratePerDimension();
+        Modulation over = Modulation.of(modulation);
+        List<Limit> limits = LimitTable.atRate(perDimension, over, of(length), of(information), of(fer), of(ber));
+        output.show(new LimitReport(limits, quantiser.limits(perDimension, over)));
         return 0;
     }
 

@@ -8,15 +8,24 @@ import dev.nearlimit.cli.output.Numbers;
 import dev.nearlimit.cli.output.Presentation;
 import dev.nearlimit.cli.output.TextTable;
 import dev.nearlimit.limits.Limit;
+import dev.nearlimit.limits.QuantisedLimit;
+import dev.nearlimit.limits.UniformLlrQuantiser;
 import java.util.List;
+import java.util.stream.Stream;
 
 /**
  * Limits as a result to show.
  *
  * @param limits in the order of the table that they came from
+ * @param quantised limits behind a quantiser, shown after the others: of a step asked for, of the best step
  */
-record LimitReport(List<Limit> limits) implements Presentation {
+record LimitReport(List<Limit> limits, List<QuantisedLimit> quantised) implements Presentation {
     private static final int DECIMALS = 4;
+
+    private List<Limit> all() {
+        return Stream.concat(limits.stream(), quantised.stream().map(QuantisedLimit::limit))
+                .toList();
+    }
 
     @Override
     public String table() {
@@ -27,7 +36,7 @@ record LimitReport(List<Limit> limits) implements Presentation {
                 .numbers("SNR", "dB")
                 .numbers("efficiency", "bit/dimension")
                 .numbers("efficiency", "bit/symbol");
-        for (Limit limit : limits) {
+        for (Limit limit : all()) {
             table.row(
                     limit.name(),
                     Numbers.fixed(limit.ebn0Db(), DECIMALS),
@@ -37,7 +46,10 @@ record LimitReport(List<Limit> limits) implements Presentation {
                     Numbers.fixed(limit.efficiencyBitsPerSymbol(), DECIMALS));
         }
         StringBuilder text = new StringBuilder(table.toString()).append('\n');
-        for (Limit limit : limits) {
+        if (!quantised.isEmpty()) {
+            text.append(lossTable()).append('\n');
+        }
+        for (Limit limit : all()) {
             for (String line : TextTable.wrap(limit.name() + ": " + limit.definition() + ".", TextTable.WIDTH)) {
                 text.append(line).append('\n');
             }
@@ -46,6 +58,24 @@ record LimitReport(List<Limit> limits) implements Presentation {
             }
         }
         return text.toString();
+    }
+
+    private TextTable lossTable() {
+        TextTable table =
+                new TextTable().words("quantiser").numbers("step", "LLR").numbers("loss", "dB");
+        for (QuantisedLimit entry : quantised) {
+            UniformLlrQuantiser quantiser = entry.quantiser();
+            String which = isBest(entry) ? ", best step" : "";
+            table.row(
+                    quantiser.wordBits() + "-bit " + quantiser.rise().designator() + which,
+                    quantiser.hasStep() ? Numbers.fixed(quantiser.step(), DECIMALS) : Numbers.UNKNOWN,
+                    Numbers.fixed(entry.lossDb(), DECIMALS));
+        }
+        return table;
+    }
+
+    private static boolean isBest(QuantisedLimit entry) {
+        return entry.limit().name().equals(QuantisedLimit.BEST_NAME);
     }
 
     @Override
@@ -59,7 +89,7 @@ record LimitReport(List<Limit> limits) implements Presentation {
                 "efficiencyBitsPerSymbol",
                 "definition",
                 "method");
-        for (Limit limit : limits) {
+        for (Limit limit : all()) {
             csv.record(
                     limit.name(),
                     limit.ebn0Db(),
@@ -77,7 +107,7 @@ record LimitReport(List<Limit> limits) implements Presentation {
     public ObjectNode json() {
         ObjectNode root = JsonText.object();
         ArrayNode rows = root.putArray("limits");
-        for (Limit limit : limits) {
+        for (Limit limit : all()) {
             ObjectNode row = rows.addObject();
             row.put("name", limit.name());
             row.put("definition", limit.definition());
@@ -88,6 +118,21 @@ record LimitReport(List<Limit> limits) implements Presentation {
             JsonText.put(row, "efficiencyBitsPerRealDimension", limit.efficiencyBitsPerRealDimension());
             JsonText.put(row, "efficiencyBitsPerSymbol", limit.efficiencyBitsPerSymbol());
         }
+        if (!quantised.isEmpty()) {
+            putQuantiser(root.putObject("quantiser"));
+        }
         return root;
+    }
+
+    private void putQuantiser(ObjectNode node) {
+        UniformLlrQuantiser any = quantised.get(0).quantiser();
+        node.put("word", any.wordBits());
+        node.put("rise", any.rise().designator());
+        for (QuantisedLimit entry : quantised) {
+            if (entry.quantiser().hasStep()) {
+                node.put(isBest(entry) ? "bestStep" : "step", entry.quantiser().step());
+            }
+            node.put(isBest(entry) ? "bestLossDb" : "lossDb", entry.lossDb());
+        }
     }
 }

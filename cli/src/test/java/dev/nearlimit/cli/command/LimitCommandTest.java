@@ -71,4 +71,71 @@ final class LimitCommandTest {
             assertEquals(1, files.count());
         }
     }
+
+    @Test
+    void stepStandsBesideTheBest() {
+        Execution execution = Execution.of("limit", "--rate", "1/2", "--word", "4", "--step", "2");
+        assertEquals(0, execution.exitCode(), execution.err());
+        assertTrue(execution.out().contains("4-bit mid-tread  "), execution.out());
+        assertTrue(execution.out().contains("4-bit mid-tread, best step"), execution.out());
+        assertTrue(execution.out().lines().allMatch(line -> line.length() <= 80), execution.out());
+        JsonNode json = Execution.of("limit", "--rate", "1/2", "--word", "4", "--step", "2", "--format", "json")
+                .json();
+        assertEquals("quantised", json.at("/limits/3/name").asText());
+        assertEquals("quantisedBestStep", json.at("/limits/4/name").asText());
+        JsonNode quantiser = json.get("quantiser");
+        assertEquals(2.0, quantiser.get("step").asDouble());
+        double unquantised = json.at("/limits/1/ebn0Db").asDouble();
+        assertEquals(
+                json.at("/limits/3/ebn0Db").asDouble() - unquantised,
+                quantiser.get("lossDb").asDouble(),
+                1e-9);
+        assertEquals(
+                json.at("/limits/4/ebn0Db").asDouble() - unquantised,
+                quantiser.get("bestLossDb").asDouble(),
+                1e-9);
+        assertTrue(
+                quantiser.get("bestLossDb").asDouble() < quantiser.get("lossDb").asDouble());
+        JsonNode best = Execution.of("limit", "--rate", "1/2", "--word", "4", "--format", "json")
+                .json()
+                .get("quantiser");
+        assertEquals(quantiser.get("bestStep"), best.get("bestStep"));
+        assertTrue(best.path("step").isMissingNode());
+    }
+
+    @Test
+    void clipSetsTheStep() {
+        JsonNode quantiser = Execution.of(
+                        "limit",
+                        "--rate",
+                        "1/2",
+                        "--word",
+                        "3",
+                        "--clip",
+                        "7",
+                        "--rise",
+                        "mid-rise",
+                        "--format",
+                        "json")
+                .json()
+                .get("quantiser");
+        assertEquals(2.0, quantiser.get("step").asDouble());
+        assertEquals("mid-rise", quantiser.get("rise").asText());
+    }
+
+    /** One bit is the hard decision, which has its row already and no step. */
+    @Test
+    void oneBitIsTheHardDecision() {
+        JsonNode json = Execution.of("limit", "--rate", "1/2", "--word", "1", "--rise", "mid-rise", "--format", "json")
+                .json();
+        assertEquals(4, json.get("limits").size());
+        assertEquals(
+                json.at("/limits/2/ebn0Db").asDouble(),
+                json.at("/limits/3/ebn0Db").asDouble(),
+                1e-8);
+        assertTrue(json.at("/quantiser/bestStep").isMissingNode());
+        assertTrue(Execution.of("limit", "--rate", "1/2", "--word", "1", "--rise", "mid-rise")
+                .out()
+                .contains("1-bit mid-rise"));
+    }
 }

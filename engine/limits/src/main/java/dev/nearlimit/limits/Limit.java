@@ -4,7 +4,7 @@ package dev.nearlimit.limits;
  * One limit: how much energy a bit needs at least, and what that means a symbol.
  *
  * @param name stable name: {@code shannon}, {@code modulation}, {@code hardDecision}, {@code uncoded},
- *     {@code normalApproximation}
+ *     {@code normalApproximation}, {@code quantised}, {@code quantisedBestStep}
  * @param definition what is limited, and by what
  * @param method how the figure was obtained, beginning with {@code exact} or {@code estimated}
  * @param ebn0Db energy per information bit over N0, in dB
