@@ -45,7 +45,7 @@ public record RunControl(BooleanSupplier cancelled, Progress progress, OptionalL
     }
 
     /** Whether the run is to end now; an interrupt of the thread that asks counts as a request. */
-    boolean stopRequested() {
+    public boolean stopRequested() {
         return Thread.currentThread().isInterrupted()
                 || cancelled.getAsBoolean()
                 || (deadline.isPresent() && System.nanoTime() - deadline.getAsLong() >= 0);

@@ -8,7 +8,7 @@ package dev.nearlimit.numerics.random;
  *
  * <ul>
  *   <li>The stream key is the first two words of P(low(point), high(point), stream, 0; low(seed), high(seed)), where
- *       stream is 1 for payload, 2 for noise and 3 for fading. The map is one to one before it is cut to 64 bits, so two
+ *       stream is 1 for payload, 2 for noise, 3 for fading and 4 for selection. The map is one to one before it is cut to 64 bits, so two
  *       pairs of point and stream share a key with probability 2^-64.
  *   <li>The starting state of frame f is two blocks under that key: s0 (low half first) and s1 from
  *       P(low(f), high(f), 0, 0), s2 and s3 from P(low(f), high(f), 1, 0). As P is one to one, the blocks differ, so no

@@ -7,7 +7,9 @@ public enum Stream {
     /** What the channel adds, or which bits it flips. */
     NOISE(2),
     /** How the channel's gain varies. */
-    FADING(3);
+    FADING(3),
+    /** Which of several distributions a frame's noise is drawn from, where it is not always the same. */
+    SELECTION(4);
 
     private final int number;
 
