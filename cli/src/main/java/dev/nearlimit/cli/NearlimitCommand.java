@@ -3,6 +3,7 @@ package dev.nearlimit.cli;
 import dev.nearlimit.cli.command.CodesCommand;
 import dev.nearlimit.cli.command.InspectCommand;
 import dev.nearlimit.cli.command.LimitCommand;
+import dev.nearlimit.cli.command.RareErrorsCommand;
 import dev.nearlimit.cli.command.SimulateCommand;
 import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
@@ -55,6 +56,7 @@ public final class NearlimitCommand implements Runnable {
                 new CodesCommand(),
                 new InspectCommand(session),
                 new SimulateCommand(session),
+                new RareErrorsCommand(session),
                 new RunsCommand(session),
                 new LimitCommand());
     }

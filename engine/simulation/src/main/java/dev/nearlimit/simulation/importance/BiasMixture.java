@@ -1,6 +1,7 @@
 package dev.nearlimit.simulation.importance;
 
 import dev.nearlimit.codes.batch.FrameBatch;
+import dev.nearlimit.numerics.functions.Exponential;
 
 /**
  * The mixture of distributions that biased noise is drawn from, and the weights that undo the bias: the balance heuristic
@@ -11,7 +12,7 @@ import dev.nearlimit.codes.batch.FrameBatch;
  * distribution c over the noise's standard deviation, S_c its set of weight w_c, T_c the sum of e over S_c and C the
  * number of distributions. The density of e is that of unbiased noise times the mean over c of exp(-d_c T_c - d_c^2 w_c /
  * 2), and a frame's weight is one over that mean. It is formed of logarithms, so that weights of 1e-130 keep their
- * digits, by StrictMath, so that they are the same on every machine.
+ * digits, by exactly rounded operations and StrictMath, so that they are the same on every machine.
  */
 final class BiasMixture {
     /** Terms are left out whose sum is below this part of the largest. */
@@ -92,7 +93,7 @@ final class BiasMixture {
         double total = 0;
         for (double exponent : exponents) {
             if (exponent > largest - reach) {
-                total += StrictMath.exp(exponent - largest);
+                total += Exponential.of(exponent - largest);
             }
         }
         return StrictMath.log(size()) - largest - StrictMath.log(total);
