@@ -77,7 +77,7 @@ record RareErrorsReport(
                 .numbers("FER part")
                 .words("95 % interval")
                 .numbers("variance")
-                .numbers("effective errors")
+                .numbers("effective", "errors")
                 .numbers("frames");
         if (allCodewords()) {
             table.numbers("ML bound");
@@ -119,7 +119,7 @@ record RareErrorsReport(
     }
 
     private String explained() {
-        String text = "Effective errors: how many counted frame errors would tell as much.";
+        String text = "Effective: how many counted frame errors would tell as much.";
         return wrapped(
                 allCodewords()
                         ? text + " ML bound: union bound over these codewords for maximum-likelihood decoding of"
