@@ -72,7 +72,7 @@ final class PointRun {
         return counter.met();
     }
 
-    /** Works until the run ends; what goes wrong is kept for {@link #counts()}. */
+    /** Works until the run ends; what goes wrong is kept for {@link #outcome()}. */
     void work() {
         try {
             FrameWorker worker = bench.take();
@@ -151,13 +151,13 @@ final class PointRun {
     }
 
     /** What was counted, once all threads have stopped working; throws what any of them threw. */
-    synchronized PointCounts counts() {
+    synchronized PointOutcome outcome() {
         if (failure instanceof RuntimeException e) {
             throw e;
         }
         if (failure instanceof Error e) {
             throw e;
         }
-        return counter.counts();
+        return counter.outcome();
     }
 }
