@@ -47,12 +47,13 @@ public final class ParityCheckProgram {
      */
     public static Optional<WordProgram> cheaperThan(
             long wordOperations, SparseBitMatrix H, int[] informationPositions) {
-        if (leastWordOperations(H, H.columns() - informationPositions.length) >= wordOperations) {
+        long spare = wordOperations - leastWordOperations(H, H.columns() - informationPositions.length);
+        if (spare <= 0) {
             return Optional.empty();
         }
         boolean[] isInformation = InformationSet.mask(H.columns(), informationPositions);
-        // A larger gap is given up, since its equations, if dense, cost as much as the program at hand.
-        int maxGap = (int) Math.min(Integer.MAX_VALUE, Math.ceil(Math.sqrt(2.0 * wordOperations)));
+        // A larger gap is given up: half of its g^2 coefficients, if dense, would already read more than is to spare.
+        int maxGap = (int) Math.ceil(Math.sqrt(2.0 * spare));
         return ApproximateTriangle.of(H, isInformation, maxGap)
                 .map(triangle -> new ParityCheckProgram(H, isInformation, triangle).cheapest())
                 .filter(program -> program.wordOperations() < wordOperations);
