@@ -18,7 +18,7 @@ import java.util.Optional;
  *       stand; nothing is computed twice. Best where few rows are named.
  *   <li>in two passes, as in Richardson and Urbanke: back-substitution with the gap positions taken as 0 gives the
  *       equations' right-hand sides; a second pass corrects what depends on the gap. The work stays proportional to the
- *       ones of the matrix, plus g^2 / 2 at most.
+ *       ones of the matrix, plus some g^2 / 2 where the gap's equations are dense.
  * </ul>
  */
 public final class ParityCheckProgram {
@@ -59,7 +59,10 @@ public final class ParityCheckProgram {
                 .filter(program -> program.wordOperations() < wordOperations);
     }
 
-    /** What back-substitution alone takes: the other ones of as many rows as there are parity positions, the lightest. */
+    /**
+     * About the least that any program of this kind reads: the other ones of as many rows as there are parity positions,
+     * the lightest.
+     */
     private static long leastWordOperations(SparseBitMatrix H, int parity) {
         int[] weights = new int[H.rows()];
         Arrays.setAll(weights, H::rowWeight);
