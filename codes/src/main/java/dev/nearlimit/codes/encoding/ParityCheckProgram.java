@@ -28,7 +28,7 @@ public final class ParityCheckProgram {
     private final GapEquations equations;
     private final int[] rank;
 
-    private ParityCheckProgram(SparseBitMatrix H, boolean[] isInformation, ApproximateTriangle triangle) {
+    ParityCheckProgram(SparseBitMatrix H, boolean[] isInformation, ApproximateTriangle triangle) {
         this.H = H;
         this.isInformation = isInformation;
         this.triangle = triangle;
@@ -93,7 +93,7 @@ public final class ParityCheckProgram {
         return bySums.wordOperations() <= twoPasses.wordOperations() ? bySums : twoPasses;
     }
 
-    private WordProgram bySums() {
+    WordProgram bySums() {
         boolean[] summed = new boolean[H.columns()];
         for (int[] peels : equations.addedPeels()) {
             for (int position : peels) {
@@ -124,7 +124,7 @@ public final class ParityCheckProgram {
         return program.build();
     }
 
-    private WordProgram twoPasses() {
+    WordProgram twoPasses() {
         boolean[] needed = neededByChecks();
         boolean[] corrected = dependentOnGap();
         WordProgram.Builder program = new WordProgram.Builder();

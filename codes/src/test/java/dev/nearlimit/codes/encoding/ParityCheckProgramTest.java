@@ -176,9 +176,17 @@ class ParityCheckProgramTest {
 
     @ParameterizedTest
     @MethodSource("sparse")
-    void randomSparseMatricesGiveTheSameCodewords(int[] shape, long seed) {
+    void bothWaysToTheGapGiveTheSameCodewordsOfRandomSparseMatrices(int[] shape, long seed) {
         Code code = code(randomColumns(shape[0], shape[1], shape[2], new Random(seed)));
+        assertBothWays(code, seed);
         assertSameCodewords(code, parityCheckProgram(code, Integer.MAX_VALUE).orElseThrow(), seed);
+    }
+
+    private static void assertBothWays(Code code, long seed) {
+        ParityCheckProgram programs = new ParityCheckProgram(
+                code.parityCheck(), InformationSet.mask(code.n(), code.informationPositions()), triangle(code));
+        assertSameCodewords(code, programs.bySums(), seed);
+        assertSameCodewords(code, programs.twoPasses(), seed);
     }
 
     private static SparseBitMatrix randomColumns(int weight, int m, int n, Random random) {
@@ -231,8 +239,7 @@ class ParityCheckProgramTest {
             H.swapRows(r, random.nextInt(H.rows()));
         }
         assertTrue(Elimination.rank(H) < H.rows(), "seed " + seed);
-        Code code = code(SparseBitMatrix.of(H));
-        assertSameCodewords(code, parityCheckProgram(code, Integer.MAX_VALUE).orElseThrow(), seed);
+        assertBothWays(code(SparseBitMatrix.of(H)), seed);
     }
 
     static LongStream seeds() {
