@@ -9,10 +9,19 @@ import java.util.Map;
 import java.util.Optional;
 
 /**
- * One run of one point, shared by its threads: hands out block numbers in order, takes finished blocks in any order and
- * counts them in theirs. A block that was begun is finished and kept even when the rule is met meanwhile.
+ * One run of one point, shared by its threads: hands out numbers of blocks that the journal gives it to compute, takes
+ * finished blocks in any order and counts them in theirs, with those that other runs of the same point have put into the
+ * journal meanwhile. A block that was begun is finished and kept even when the rule is met meanwhile.
  */
 final class PointRun {
+    /** How far blocks may be computed ahead of one that is missing; keeps memory flat where somebody else holds it. */
+    private static final long MOST_BLOCKS_AHEAD = 1024;
+
+    /** How often the journal is asked for a block that somebody else has under way [ms]. */
+    private static final long POLL_MS = 50;
+
+    private static final long NONE = -1;
+
     private final SchemeBench bench;
     private final PointStreams streams;
     private final Journal journal;
@@ -23,8 +32,8 @@ final class PointRun {
 
     private final PrefixCounter counter;
     private final Map<Long, Block> waiting = new HashMap<>();
-    private long nextToHandOut;
     private long nextToCount;
+    private BlockLease lease;
     private Throwable failure;
     private boolean ended;
 
@@ -50,21 +59,23 @@ final class PointRun {
      * Counts the blocks that the journal has from the first one on. Called before any thread works, so that a point that
      * needs nothing more makes no thread run ahead.
      */
-    void countKept() {
-        for (long block = handOut(); block >= 0; block = handOut()) {
-            Optional<byte[]> kept = journal.find(job, block);
-            if (kept.isEmpty()) {
-                handBack();
-                return;
-            }
-            tally.found(job, block);
-            count(block, Block.fromBytes(kept.get()));
+    synchronized void countKept() {
+        boolean found = true;
+        while (found && !counter.met() && !control.stopRequested()) {
+            found = countKept(nextToCount);
         }
+        lease = new BlockLease(journal, job, nextToCount, blocksAtMost);
     }
 
-    /** Takes back the number handed out last. */
-    private synchronized void handBack() {
-        nextToHandOut--;
+    /** Counts a block if the journal has it. */
+    private boolean countKept(long block) {
+        Optional<byte[]> kept = journal.find(job, block);
+        if (kept.isEmpty()) {
+            return false;
+        }
+        tally.found(job, block);
+        count(block, Block.fromBytes(kept.get()));
+        return true;
     }
 
     /** Whether nothing is left to do. */
@@ -77,7 +88,7 @@ final class PointRun {
         try {
             FrameWorker worker = bench.take();
             PointWorker chain = new PointWorker(worker);
-            for (long block = handOut(); block >= 0; block = handOut()) {
+            for (long block = handOut(); block != NONE; block = handOut()) {
                 Optional<Block> result = chain.findOrCompute(block);
                 if (result.isEmpty()) {
                     end();
@@ -116,11 +127,43 @@ final class PointRun {
         }
     }
 
+    /** The next block to compute; waits for other runs of this point where nothing is left but what they have. */
     private synchronized long handOut() {
-        if (ended || counter.met() || nextToHandOut >= blocksAtMost || control.stopRequested()) {
-            return -1;
+        while (!ended && !control.stopRequested()) {
+            while (lease.awaits(nextToCount) && !counter.met() && countAwaited()) {
+                // Each round counts one block more.
+            }
+            if (counter.met() || lease.usedUp()) {
+                break;
+            }
+            long limit = nextToCount + MOST_BLOCKS_AHEAD;
+            long block = lease.next(limit);
+            if (block != NONE) {
+                return block;
+            }
+            if (!lease.extend(nextToCount, limit)) {
+                pause();
+            }
         }
-        return nextToHandOut++;
+        return NONE;
+    }
+
+    private boolean countAwaited() {
+        long block = nextToCount;
+        boolean found = countKept(block);
+        if (found) {
+            lease.arrived(block);
+        }
+        return found;
+    }
+
+    private void pause() {
+        try {
+            wait(POLL_MS);
+        } catch (InterruptedException e) {
+            // Asked next whether to stop, the run finds its thread interrupted.
+            Thread.currentThread().interrupt();
+        }
     }
 
     private synchronized void count(long number, Block block) {
@@ -134,6 +177,7 @@ final class PointRun {
             }
         }
         if (counted) {
+            notifyAll();
             PointCounts counts = counter.counts();
             control.progress().counted(counts.frames(), counts.frameErrors());
         }
@@ -141,6 +185,16 @@ final class PointRun {
 
     synchronized void end() {
         ended = true;
+    }
+
+    /** Called once all threads have stopped working: gives back what was not computed and has the journal write. */
+    synchronized void close() {
+        try {
+            lease.release();
+            journal.flush();
+        } catch (RuntimeException e) {
+            fail(e);
+        }
     }
 
     private synchronized void fail(Throwable thrown) {

@@ -96,6 +96,7 @@ public final class Simulator {
         }
         run.work();
         await(started, run);
+        run.close();
         return run.counts();
     }
 
