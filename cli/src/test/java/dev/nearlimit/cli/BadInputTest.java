@@ -77,6 +77,7 @@ final class BadInputTest {
                 "rare-errors bch:127,64 --decoder bounded-distance --ebn0 5 --sets lightest | bch:127,64 has 2^64 codewords; those of low weight are listed for up to 2^26",
                 "rare-errors hamming:7,4 --decoder syndrome --ebn0 5 --sets lightest --shifts 0.5,far | shift is 'far'; expected a list of numbers such as 0.5,0.75,1",
                 "rare-errors hamming:7,4 --decoder syndrome --ebn0 5 --sets lightest --shifts 3 | shift is 3.0, must be above 0 and at most 2",
+                "rare-errors hamming:7,4 --decoder syndrome --ebn0 5 --sets lightest --channel bsc | channel is bsc, importance sampling is for awgn (on which hard-decision decoders see signs alone)",
                 "rare-errors hamming:7,4 --decoder syndrome --ebn0 5 --sets lightest --frames 0 | frames is 0, must be at least 1",
                 "rare-errors hamming:7,4 --decoder syndrome --ebn0 40 --sets lightest | at Eb/N0 40.0 dB sets of weight 3 cause errors at rates below 1e-130; importance sampling ends there",
                 "rare-errors hamming:7,4 --decoder bounded --ebn0 5 --sets lightest | unknown decoder 'bounded'; known are syndrome, bounded-distance, maximum-likelihood, sum-product, min-sum",

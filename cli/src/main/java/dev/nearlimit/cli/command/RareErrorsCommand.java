@@ -96,6 +96,14 @@ public final class RareErrorsCommand implements Callable<Integer> {
     private String modulation;
 
     @Option(
+            names = "--channel",
+            paramLabel = "CHANNEL",
+            defaultValue = "awgn",
+            description = "awgn, or awgn with the receiver's mistakes as in nearlimit simulate"
+                    + " (default: ${DEFAULT-VALUE}).")
+    private String channel;
+
+    @Option(
             names = "--seed",
             paramLabel = "N",
             defaultValue = "1",
@@ -132,7 +140,7 @@ public final class RareErrorsCommand implements Callable<Integer> {
         Modulation over = Modulation.of(modulation);
         int workers = threads.count();
         Code code = argument.code();
-        Scheme scheme = new Scheme(code, choice.decoder(), over, choice.quantiser(), new Channel.Awgn());
+        Scheme scheme = new Scheme(code, choice.decoder(), over, choice.quantiser(), Channel.of(channel));
         ImportanceSampler sampler =
                 new ImportanceSampler(scheme, new NoiseBias(new ErrorSetSource(sets).sets(code), shifts.values()));
         long start = System.nanoTime();

@@ -90,7 +90,7 @@ public record Mismatch(long noiseEstimateMicroDb, long gainMicroDb) {
      * What the receiver's LLRs are of the true ones, linear. StrictMath, because it enters every received value and must
      * be the same on every machine; exactly 1 without mismatch.
      */
-    double llrFactor() {
+    public double llrFactor() {
         return StrictMath.pow(10, (gainMicroDb / 20.0 - noiseEstimateMicroDb / 10.0) / MICRO.doubleValue());
     }
 }

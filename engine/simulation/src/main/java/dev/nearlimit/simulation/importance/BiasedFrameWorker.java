@@ -4,6 +4,7 @@ import dev.nearlimit.codes.batch.FrameBatch;
 import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.decoders.batch.DecodedBatch;
 import dev.nearlimit.decoders.batch.LlrBatch;
+import dev.nearlimit.numerics.kernels.Kernels;
 import dev.nearlimit.numerics.noise.UniformDraws;
 import dev.nearlimit.numerics.random.FrameStreams;
 import dev.nearlimit.numerics.random.Stream;
@@ -59,20 +60,11 @@ final class BiasedFrameWorker {
         payload.fill(firstFrame, information);
         scheme.code().encoder().encode(information, codeword);
         noise.fill(firstFrame, codeword, samples);
-        for (int i = 0; i < codeword.length; i++) {
-            demap(codeword[i], FrameBatch.softIndex(i, 0));
-        }
+        System.arraycopy(samples, 0, received.values(), 0, samples.length);
+        Kernels.reception().demap(codeword, 0, codeword.length, sigma, llrOfUnit, received.values(), 0);
         scheme.quantiser().apply(received);
         decoder.decode(received, decoded);
         return weigh(failed() & FrameBatch.laneMask(frames)).withFrames(frames);
-    }
-
-    private void demap(long bits, int at) {
-        float[] values = received.values();
-        for (int f = 0; f < FrameBatch.FRAMES; f++) {
-            float signal = 1 - 2 * (int) (bits >>> f & 1);
-            values[at + f] = (signal + sigma * samples[at + f]) * llrOfUnit;
-        }
     }
 
     /** Lanes with a wrong information bit or a declared failure; fills what is wrong at every position. */

@@ -1,7 +1,6 @@
 package dev.nearlimit.simulation.importance;
 
 import dev.nearlimit.limits.GaussianTail;
-import dev.nearlimit.simulation.Channel;
 import dev.nearlimit.simulation.InvalidSimulationException;
 import dev.nearlimit.simulation.Point;
 import dev.nearlimit.simulation.RunControl;
@@ -46,11 +45,7 @@ public final class ImportanceSampler {
      *     code's length
      */
     public ImportanceSampler(Scheme scheme, NoiseBias bias) {
-        if (!(scheme.channel() instanceof Channel.Awgn)) {
-            throw new InvalidSimulationException(
-                    "channel is " + scheme.channel().designator()
-                            + ", importance sampling is for awgn (on which hard-decision decoders see signs alone)");
-        }
+        BiasedPoint.requireAwgn(scheme);
         for (ErrorSet set : bias.sets()) {
             if (set.highest() >= scheme.code().n()) {
                 throw new InvalidSimulationException(

@@ -124,6 +124,42 @@ class ImportanceSamplerTest {
         assertTrue(estimate.frameErrorRatePart() > 0.6 * fer - SIGMAS * deviation, fer + " " + estimate);
     }
 
+    /**
+     * Without any shift the frames are those of a plain simulation, one by one, and with all words as sets every error of
+     * maximum likelihood counts. Behind a coarse quantiser a few errors come of noise that leans less than half way;
+     * taking the receiver's mistake about the gain for nothing would double the count.
+     */
+    @ParameterizedTest
+    @CsvSource({
+        "'hamming:7,4', 'maximum-likelihood', 'awgn', 1",
+        "'bch:15,7', 'maximum-likelihood', 'awgn:gain=3', 1",
+        "'bch:15,7', 'maximum-likelihood:word=3,step=1.5', 'awgn:gain=12', 0.95"
+    })
+    void withoutShiftsFramesAreThoseOfPlainSimulation(String designator, String decoder, String channel, double least) {
+        Code code = Catalogue.standard().build(designator);
+        DecoderChoice choice = DecoderDesignator.parse(decoder);
+        Scheme scheme = new Scheme(code, choice.decoder(), Modulation.BPSK, choice.quantiser(), Channel.of(channel));
+        NoiseBias bias = NoiseBias.towards(words(code, EVERY_WEIGHT));
+        WeightTally tally = unshifted(scheme, bias, BiasedPoint.of(scheme, bias, Point.ofEbn0Db(2), 77), 6_400);
+        PointCounts plain = plain(scheme, 2, 6_400);
+        assertTrue(plain.frameErrors() > 100, plain.toString());
+        assertTrue(tally.errors() <= plain.frameErrors(), tally + " of " + plain);
+        assertTrue(tally.errors() >= least * plain.frameErrors(), tally + " of " + plain);
+    }
+
+    /** No shift at all is plain simulation: every weight is 1. */
+    private static WeightTally unshifted(Scheme scheme, NoiseBias bias, BiasedPoint point, long frames) {
+        int[] weights = bias.sets().stream().mapToInt(ErrorSet::weight).toArray();
+        WeightTally tally = new BiasedRun(
+                        () -> new BiasedFrameWorker(
+                                scheme, bias.sets(), new BiasMixture(weights, new double[] {0}, point.sigma()), point),
+                        frames,
+                        RunControl.none())
+                .onThreads(2);
+        assertEquals(tally.errors(), tally.sum(), 1e-6 * tally.errors());
+        return tally;
+    }
+
     /** Whatever the decoder does, the weighted count estimates the probability that a plain count estimates. */
     @ParameterizedTest
     @CsvSource({
@@ -138,15 +174,7 @@ class ImportanceSamplerTest {
         Scheme scheme = scheme(code, decoder);
         NoiseBias bias = NoiseBias.towards(words(code, lightest(code)));
         BiasedPoint point = BiasedPoint.of(scheme, bias, Point.ofEbn0Db(ebn0Db), 5);
-        int[] weights = bias.sets().stream().mapToInt(ErrorSet::weight).toArray();
-        // No shift at all is plain simulation: every weight is 1.
-        WeightTally plain = new BiasedRun(
-                        () -> new BiasedFrameWorker(
-                                scheme, bias.sets(), new BiasMixture(weights, new double[] {0}, point.sigma()), point),
-                        40_000,
-                        RunControl.none())
-                .onThreads(2);
-        assertEquals(plain.errors(), plain.sum(), 1e-6 * plain.errors());
+        WeightTally plain = unshifted(scheme, bias, point, 40_000);
         assertTrue(plain.errors() > 50, plain.toString());
         RareErrorEstimate estimate =
                 new ImportanceSampler(scheme, bias).run(Point.ofEbn0Db(ebn0Db), 6, 20_000, 2, RunControl.none());
