@@ -44,6 +44,9 @@ record RareErrorsReport(
     /** With fewer, an interval hangs on single frames. */
     private static final double FEW = 20;
 
+    /** A single frame with more of the sum than this stands for others that were not met. */
+    private static final double LARGE_SHARE = 0.1;
+
     /**
      * A point.
      *
@@ -129,7 +132,8 @@ record RareErrorsReport(
 
     private String doubts() {
         String points = entries.stream()
-                .filter(entry -> entry.estimate().effectiveSampleSize() < FEW)
+                .filter(entry -> entry.estimate().effectiveSampleSize() < FEW
+                        || entry.estimate().largestShare() > LARGE_SHARE)
                 .map(entry -> Numbers.trimmed(entry.ebn0Db()))
                 .collect(Collectors.joining(", "));
         return points.isEmpty()
