@@ -61,6 +61,11 @@ final class ByteLayeredMinSum extends BeliefPropagation {
 
     @Override
     long hardDecisions(int position) {
+        return signs(posterior, position);
+    }
+
+    /** Bit f is 1 exactly where the posterior of frame f is below 0. */
+    static long signs(byte[] posterior, int position) {
         int at = position * FrameBatch.FRAMES;
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f += Byte.SIZE) {

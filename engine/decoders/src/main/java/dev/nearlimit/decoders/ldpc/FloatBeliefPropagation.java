@@ -2,7 +2,9 @@ package dev.nearlimit.decoders.ldpc;
 
 import dev.nearlimit.codes.batch.FrameBatch;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
+import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.decoders.batch.LlrBatch;
+import dev.nearlimit.numerics.kernels.DecoderKernels;
 import java.util.Arrays;
 
 /**
@@ -50,13 +52,16 @@ final class FloatBeliefPropagation extends BeliefPropagation {
         this.incoming = new float[runs.largestDegree()][touched.length];
     }
 
+    /** A decoder that gives the same on kernels. */
+    static Decoder on(DecoderKernels kernels, SparseBitMatrix matrix, Iterations iterations, FloatChecks checks) {
+        return iterations.schedule() == Schedule.LAYERED
+                ? new LayeredFloat(matrix, iterations, checks)
+                : new FloodingFloat(matrix, iterations, checks, kernels.bitSums());
+    }
+
     @Override
     void load(LlrBatch received) {
-        float[] values = received.values();
-        for (int i = 0; i < posterior.length; i++) {
-            // Adding +0 turns -0 into +0.
-            posterior[i] = Math.max(-LARGEST, Math.min(LARGEST, values[i])) + 0f;
-        }
+        limit(received.values(), posterior);
         System.arraycopy(posterior, 0, channel, 0, channel.length);
         for (float[] ofEdge : message) {
             Arrays.fill(ofEdge, 0f);
@@ -97,6 +102,19 @@ final class FloatBeliefPropagation extends BeliefPropagation {
 
     @Override
     long hardDecisions(int position) {
+        return signs(posterior, position);
+    }
+
+    /** The channel's LLRs as decoders start from them: limited, and without -0. */
+    static void limit(float[] received, float[] limited) {
+        for (int i = 0; i < limited.length; i++) {
+            // Adding +0 turns -0 into +0.
+            limited[i] = Math.max(-LARGEST, Math.min(LARGEST, received[i])) + 0f;
+        }
+    }
+
+    /** Bit f is 1 exactly where the posterior of frame f is below 0; none is -0. */
+    static long signs(float[] posterior, int position) {
         int at = position * FrameBatch.FRAMES;
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f++) {

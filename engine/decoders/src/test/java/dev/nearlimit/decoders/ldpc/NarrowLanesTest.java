@@ -66,7 +66,7 @@ class NarrowLanesTest {
         MagnitudeCorrection correction =
                 eighths < 8 ? new MagnitudeCorrection.Scale(eighths) : new MagnitudeCorrection.Offset(offset);
         Decoder decoder = new MinSumSettings(EARLY, correction, Optional.of(words))
-                .fixedPoint(code.parityCheck(), words, Kernels.layeredMinSum());
+                .fixedPoint(code.parityCheck(), words, Kernels.decoders());
         assertEquals(bitsOfLane == 8 ? ByteLayeredMinSum.class : ShortLayeredMinSum.class, decoder.getClass());
         compare(code.parityCheck(), words, correction, EARLY, batch, "seed " + posterior);
         compare(code.parityCheck(), words, correction, ALL, batch, "seed " + posterior);
@@ -105,12 +105,12 @@ class NarrowLanesTest {
             Iterations iterations,
             LlrBatch batch,
             String seed) {
-        assertTrue(Kernels.layeredMinSum().isPresent(), "this test needs --add-modules jdk.incubator.vector");
+        assertTrue(Kernels.decoders().isPresent(), "this test needs --add-modules jdk.incubator.vector");
         MinSumSettings settings = new MinSumSettings(iterations, correction, Optional.of(words));
         DecodedBatch expected = new DecodedBatch(matrix.columns());
         DecodedBatch found = new DecodedBatch(matrix.columns());
         settings.fixedPoint(matrix, words, Optional.empty()).decode(batch, expected);
-        settings.fixedPoint(matrix, words, Kernels.layeredMinSum()).decode(batch, found);
+        settings.fixedPoint(matrix, words, Kernels.decoders()).decode(batch, found);
         String where = seed + ", " + settings.designator();
         assertArrayEquals(expected.bits(), found.bits(), where);
         assertArrayEquals(expected.iterations(), found.iterations(), where);
