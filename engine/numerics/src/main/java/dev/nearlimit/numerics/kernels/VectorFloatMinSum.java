@@ -74,22 +74,16 @@ final class VectorFloatMinSum {
      * the least as it was.
      */
     private static void correct(float[] scratch, int minima, int lanes, float factor, float offset, float largest) {
+        int offsetBits = Float.floatToRawIntBits(offset);
+        int largestBits = Float.floatToRawIntBits(largest);
         for (int l = minima; l < minima + lanes; l += FLOATS.length()) {
-            FloatVector least = FloatVector.fromArray(FLOATS, scratch, l);
-            FloatVector second = FloatVector.fromArray(FLOATS, scratch, l + lanes);
-            corrected(second, factor, offset, largest).intoArray(scratch, l + lanes);
-            corrected(least, factor, offset, largest).intoArray(scratch, l + 3 * lanes);
+            FloatVector m = FloatVector.fromArray(FLOATS, scratch, l).mul(factor);
+            m = m.sub(m.reinterpretAsInts().min(offsetBits).reinterpretAsFloats());
+            m.reinterpretAsInts().min(largestBits).reinterpretAsFloats().intoArray(scratch, l + 3 * lanes);
+            m = FloatVector.fromArray(FLOATS, scratch, l + lanes).mul(factor);
+            m = m.sub(m.reinterpretAsInts().min(offsetBits).reinterpretAsFloats());
+            m.reinterpretAsInts().min(largestBits).reinterpretAsFloats().intoArray(scratch, l + lanes);
         }
-    }
-
-    private static FloatVector corrected(FloatVector m, float factor, float offset, float largest) {
-        FloatVector scaled = m.mul(factor);
-        return lesser(scaled.sub(lesser(scaled, offset)), largest);
-    }
-
-    /** The lesser of magnitudes. */
-    private static FloatVector lesser(FloatVector m, float other) {
-        return m.reinterpretAsInts().min(Float.floatToRawIntBits(other)).reinterpretAsFloats();
     }
 
     private static void send(
