@@ -5,7 +5,6 @@ import dev.nearlimit.codes.gf2.SparseBitMatrix;
 import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.numerics.kernels.DecoderKernels;
-import java.util.Arrays;
 
 /**
  * Belief propagation in single precision with any check rule. A check reads from each of its bits t = posterior - its own
@@ -25,6 +24,7 @@ final class FloatBeliefPropagation extends BeliefPropagation {
     /** Largest magnitude of a channel LLR and of a message. */
     static final float LARGEST = 1024f;
 
+    private final ChosenLanes starting = new ChosenLanes();
     private final RowRuns runs;
     private final boolean layered;
     private final FloatCheckRule rule;
@@ -55,16 +55,17 @@ final class FloatBeliefPropagation extends BeliefPropagation {
     /** A decoder that gives the same on kernels. */
     static Decoder on(DecoderKernels kernels, SparseBitMatrix matrix, Iterations iterations, FloatChecks checks) {
         return iterations.schedule() == Schedule.LAYERED
-                ? new LayeredFloat(matrix, iterations, checks)
-                : new FloodingFloat(matrix, iterations, checks, kernels.bitSums());
+                ? new LayeredFloat(matrix, iterations, checks, kernels.layeredFloat())
+                : new FloodingFloat(matrix, iterations, checks, kernels);
     }
 
     @Override
-    void load(LlrBatch received) {
-        limit(received.values(), posterior);
-        System.arraycopy(posterior, 0, channel, 0, channel.length);
+    void load(LlrBatch received, long lanes) {
+        starting.choose(lanes);
+        starting.copyLimited(received.values(), LARGEST, posterior);
+        starting.copyLimited(received.values(), LARGEST, channel);
         for (float[] ofEdge : message) {
-            Arrays.fill(ofEdge, 0f);
+            starting.clear(ofEdge);
         }
     }
 
@@ -102,23 +103,14 @@ final class FloatBeliefPropagation extends BeliefPropagation {
 
     @Override
     long hardDecisions(int position) {
-        return signs(posterior, position);
+        return signs(posterior, position * FrameBatch.FRAMES);
     }
 
-    /** The channel's LLRs as decoders start from them: limited, and without -0. */
-    static void limit(float[] received, float[] limited) {
-        for (int i = 0; i < limited.length; i++) {
-            // Adding +0 turns -0 into +0.
-            limited[i] = Math.max(-LARGEST, Math.min(LARGEST, received[i])) + 0f;
-        }
-    }
-
-    /** Bit f is 1 exactly where the posterior of frame f is below 0; none is -0. */
-    static long signs(float[] posterior, int position) {
-        int at = position * FrameBatch.FRAMES;
+    /** Bit f is 1 exactly where value f of a row that begins at some place has a sign. */
+    static long signs(float[] values, int at) {
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f++) {
-            word |= (Float.floatToRawIntBits(posterior[at + f]) >>> 31 & 1L) << f;
+            word |= (Float.floatToRawIntBits(values[at + f]) >>> 31 & 1L) << f;
         }
         return word;
     }

@@ -57,6 +57,11 @@ final class FloodingPasses {
         return runs.length;
     }
 
+    /** All runs, on the posteriors themselves. */
+    CheckRun[] all() {
+        return runs;
+    }
+
     /** Where the posteriors of a run's bits begin. */
     int[] bits(int run) {
         return runs[run].bits();

@@ -9,15 +9,19 @@ import java.util.Arrays;
 
 /** Layered belief propagation in single precision on kernels. It gives what {@link FloatBeliefPropagation} gives, to the bit. */
 final class LayeredFloat extends BeliefPropagation {
+    private final LayeredFloatKernels kernels;
     private final FloatChecks checks;
     private final CheckRun[] runs;
     private final float[] posterior;
     private final float[] message;
     private final float[] scratch;
+    private final ChosenLanes starting = new ChosenLanes();
+    private final float[] row = new float[FrameBatch.FRAMES];
 
-    LayeredFloat(SparseBitMatrix matrix, Iterations iterations, FloatChecks checks) {
+    LayeredFloat(SparseBitMatrix matrix, Iterations iterations, FloatChecks checks, LayeredFloatKernels kernels) {
         super(matrix, iterations);
         this.checks = checks;
+        this.kernels = kernels;
         this.runs = new RowRuns(matrix).checkRuns();
         this.posterior = new float[matrix.columns() * FrameBatch.FRAMES];
         this.message = new float[matrix.ones() * FrameBatch.FRAMES];
@@ -29,9 +33,10 @@ final class LayeredFloat extends BeliefPropagation {
     }
 
     @Override
-    void load(LlrBatch received) {
-        FloatBeliefPropagation.limit(received.values(), posterior);
-        Arrays.fill(message, 0f);
+    void load(LlrBatch received, long lanes) {
+        starting.choose(lanes);
+        starting.copyLimited(received.values(), FloatBeliefPropagation.LARGEST, posterior);
+        starting.clear(message);
     }
 
     @Override
@@ -42,7 +47,16 @@ final class LayeredFloat extends BeliefPropagation {
     }
 
     @Override
+    long unsatisfied(long inQuestion) {
+        Arrays.fill(row, 0f);
+        for (CheckRun run : runs) {
+            kernels.addUnsatisfied(run, posterior, row);
+        }
+        return FloatBeliefPropagation.signs(row, 0) & inQuestion;
+    }
+
+    @Override
     long hardDecisions(int position) {
-        return FloatBeliefPropagation.signs(posterior, position);
+        return FloatBeliefPropagation.signs(posterior, position * FrameBatch.FRAMES);
     }
 }

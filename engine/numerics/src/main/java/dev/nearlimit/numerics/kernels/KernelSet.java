@@ -7,4 +7,4 @@ import java.util.Optional;
  *
  * @param decoders empty where decoders do better with loops of their own
  */
-record KernelSet(NoiseKernels noise, Optional<DecoderKernels> decoders) {}
+record KernelSet(NoiseKernels noise, ReceptionKernels reception, Optional<DecoderKernels> decoders) {}

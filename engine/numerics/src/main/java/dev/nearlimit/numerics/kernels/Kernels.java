@@ -24,6 +24,11 @@ public final class Kernels {
         return SET.noise();
     }
 
+    /** The kernels that turn noise into what a decoder reads. */
+    public static ReceptionKernels reception() {
+        return SET.reception();
+    }
+
     /**
      * The kernels of decoders; empty in plain Java, where narrow lanes gain nothing and the decoders' own loops are laid
      * out so that the JIT makes SIMD of them.
@@ -43,7 +48,7 @@ public final class Kernels {
     }
 
     static KernelSet plain() {
-        return new KernelSet(new PlainNoiseKernels(), Optional.empty());
+        return new KernelSet(new PlainNoiseKernels(), new PlainReceptionKernels(), Optional.empty());
     }
 
     private static KernelSet vector() {

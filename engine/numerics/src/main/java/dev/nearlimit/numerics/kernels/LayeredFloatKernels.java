@@ -38,6 +38,13 @@ public interface LayeredFloatKernels {
      */
     void minSum(CheckRun run, FloatCorrection correction, float[] posterior, float[] message, float[] scratch);
 
+    /**
+     * Takes into account which lanes leave a check of the run unsatisfied.
+     *
+     * @param found 64 values; those of such lanes become -0, which are +0 at first
+     */
+    void addUnsatisfied(CheckRun run, float[] posterior, float[] found);
+
     /** Values of scratch memory that the kernels need for a run. */
     static int scratch(CheckRun run) {
         int blocks = Math.min(run.lanes(), MOST_LANES);

@@ -42,8 +42,16 @@ final class VectorBoxPlus {
                     .lanewise(AND, magnitudes)
                     .min(limit)
                     .reinterpretAsFloats();
-            FloatVector u =
-                    s.mul(c5).add(c4).mul(s).add(c3).mul(s).add(c2).mul(s).add(c1).mul(s).add(c0);
+            FloatVector u = s.mul(c5)
+                    .add(c4)
+                    .mul(s)
+                    .add(c3)
+                    .mul(s)
+                    .add(c2)
+                    .mul(s)
+                    .add(c1)
+                    .mul(s)
+                    .add(c0);
             u = u.mul(u);
             u = u.mul(u);
             u = u.mul(u);
@@ -52,8 +60,16 @@ final class VectorBoxPlus {
                     .lanewise(AND, magnitudes)
                     .min(limit)
                     .reinterpretAsFloats();
-            FloatVector v =
-                    s.mul(c5).add(c4).mul(s).add(c3).mul(s).add(c2).mul(s).add(c1).mul(s).add(c0);
+            FloatVector v = s.mul(c5)
+                    .add(c4)
+                    .mul(s)
+                    .add(c3)
+                    .mul(s)
+                    .add(c2)
+                    .mul(s)
+                    .add(c1)
+                    .mul(s)
+                    .add(c0);
             v = v.mul(v);
             v = v.mul(v);
             v = v.mul(v);

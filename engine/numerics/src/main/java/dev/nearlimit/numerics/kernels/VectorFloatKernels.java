@@ -11,4 +11,9 @@ final class VectorFloatKernels implements LayeredFloatKernels {
     public void minSum(CheckRun run, FloatCorrection correction, float[] posterior, float[] message, float[] scratch) {
         VectorFloatMinSum.update(run, correction, posterior, message, scratch);
     }
+
+    @Override
+    public void addUnsatisfied(CheckRun run, float[] posterior, float[] found) {
+        VectorFloatMinSum.addUnsatisfied(run, posterior, found);
+    }
 }

@@ -19,6 +19,7 @@ final class VectorFloatMinSum {
     private static final VectorSpecies<Integer> INTS = IntVector.SPECIES_PREFERRED;
     private static final int MAGNITUDE = 0x7fffffff;
     private static final int SIGN = 0x80000000;
+    private static final int FRAMES = 64;
     private static final int INFINITY = 0x7f800000;
 
     private VectorFloatMinSum() {}
@@ -115,6 +116,24 @@ final class VectorFloatMinSum {
                 m.intoArray(message, messages + i * stride + l);
                 t.add(m).intoArray(posterior, bits[i] + from + l);
             }
+        }
+    }
+
+    static void addUnsatisfied(CheckRun run, float[] posterior, float[] found) {
+        int[] bits = run.bits();
+        for (int l = 0; l < run.lanes(); l += FLOATS.length()) {
+            IntVector sum = IntVector.zero(INTS);
+            for (int i = 0; i < bits.length; i++) {
+                sum = sum.lanewise(
+                        XOR,
+                        FloatVector.fromArray(FLOATS, posterior, bits[i] + l).reinterpretAsInts());
+            }
+            sum = sum.lanewise(AND, SIGN);
+            FloatVector.fromArray(FLOATS, found, l % FRAMES)
+                    .reinterpretAsInts()
+                    .lanewise(OR, sum)
+                    .reinterpretAsFloats()
+                    .intoArray(found, l % FRAMES);
         }
     }
 }

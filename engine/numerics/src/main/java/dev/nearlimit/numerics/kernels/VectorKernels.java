@@ -9,6 +9,9 @@ final class VectorKernels {
     static KernelSet all() {
         DecoderKernels decoders =
                 new DecoderKernels(new VectorMinSumKernels(), new VectorFloatKernels(), new VectorBitSums());
-        return new KernelSet(new VectorNoiseKernels(), Optional.of(decoders));
+        return new KernelSet(
+                new VectorNoiseKernels(),
+                VectorReceptionKernels.fits() ? new VectorReceptionKernels() : new PlainReceptionKernels(),
+                Optional.of(decoders));
     }
 }
