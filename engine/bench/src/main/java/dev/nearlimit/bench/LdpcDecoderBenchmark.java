@@ -23,8 +23,8 @@ import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
 
 /**
- * The decoder alone, 10 layered iterations of min-sum on every frame: coded bits a microsecond, which is Mb/s. Word
- * lengths of 5 and 7 bits fit 8-bit lanes, 6 and 8 bits need 16.
+ * The decoder alone, 10 iterations on every frame: coded bits a microsecond, which is Mb/s. Word lengths of 5 and 7 bits
+ * fit 8-bit lanes, 6 and 8 bits need 16; decoders without a word length work in single precision.
  */
 @State(Scope.Thread)
 @Warmup(iterations = 3, time = 2)
@@ -35,11 +35,20 @@ import org.openjdk.jmh.annotations.Warmup;
 public class LdpcDecoderBenchmark {
     static final int N = 1944;
 
-    @Param({"5", "6"})
-    public int word;
+    /** With blanks for commas, which separate values of a parameter on the command line. */
+    @Param({
+        "min-sum:word=5 scale=6/8",
+        "min-sum:word=5 offset=1",
+        "min-sum:word=6 scale=6/8",
+        "min-sum:word=6 offset=1",
+        "min-sum:scale=6/8",
+        "min-sum:offset=0.5",
+        "sum-product"
+    })
+    public String designator;
 
-    @Param({"scale=6/8", "offset=1"})
-    public String correction;
+    @Param({"layered", "flooding"})
+    public String schedule;
 
     private final LlrBatch received = new LlrBatch(N);
     private final DecodedBatch decoded = new DecodedBatch(N);
@@ -48,13 +57,15 @@ public class LdpcDecoderBenchmark {
     @Setup
     public void prepare() {
         Code code = Catalogue.standard().build("ldpc-802.11n:" + N + ",1/2");
-        DecoderChoice choice =
-                DecoderDesignator.parse("min-sum:iterations=10,early-stop=false,word=" + word + "," + correction);
+        String common = "iterations=10,early-stop=false,schedule=" + schedule;
+        String separator = designator.contains(":") ? "," : ":";
+        DecoderChoice choice = DecoderDesignator.parse(designator.replace(' ', ',') + separator + common);
         decoder = choice.decoder().newDecoder(code, choice.quantiser());
         Random random = new Random(1);
         for (int i = 0; i < received.levels().length; i++) {
             long level = Math.round(4 + 5 * random.nextGaussian());
             received.levels()[i] = (byte) Math.max(-15, Math.min(15, level));
+            received.values()[i] = 0.5f * received.levels()[i] + (float) random.nextGaussian() / 8;
         }
     }
 

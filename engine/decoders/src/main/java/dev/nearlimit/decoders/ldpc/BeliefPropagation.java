@@ -68,7 +68,7 @@ abstract class BeliefPropagation implements RefillingDecoder {
         long unsatisfied = unsatisfied(inQuestion);
         long ends = (inQuestion & ~unsatisfied) | last;
         if (ends != 0) {
-            syndrome.copyDecisions(ended.bits());
+            decisions(ended.bits());
             ended.setDeclaredFailures(unsatisfied & ends);
             lanes.end(ends, ended, finished);
         }
@@ -80,6 +80,11 @@ abstract class BeliefPropagation implements RefillingDecoder {
      */
     long unsatisfied(long inQuestion) {
         return syndrome.unsatisfied(inQuestion);
+    }
+
+    /** Hard decisions of all positions; may be asked once after {@link #unsatisfied}. */
+    void decisions(long[] bits) {
+        syndrome.copyDecisions(bits);
     }
 
     /** Starts some lanes: their posteriors are the channel's values, their messages 0. Other lanes stay what they are. */

@@ -31,6 +31,7 @@ final class ByteLayeredMinSum extends BeliefPropagation {
     private final ChosenLanes starting = new ChosenLanes();
     private final byte[] row = new byte[FrameBatch.FRAMES];
     private final byte[] keep;
+    private final long[] words = new long[512];
     private long started;
 
     ByteLayeredMinSum(
@@ -86,11 +87,17 @@ final class ByteLayeredMinSum extends BeliefPropagation {
     }
 
     @Override
+    void decisions(long[] bits) {
+        kernels.signs(posterior, bits, words);
+    }
+
+    @Override
     long hardDecisions(int position) {
         return signs(posterior, position * FrameBatch.FRAMES);
     }
 
-    private static long signs(byte[] values, int at) {
+    /** Bit f is 1 exactly where value f of a row that begins at some place is below 0. */
+    static long signs(byte[] values, int at) {
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f += Byte.SIZE) {
             long signs = (long) EIGHT_BYTES.get(values, at + f) & SIGNS;

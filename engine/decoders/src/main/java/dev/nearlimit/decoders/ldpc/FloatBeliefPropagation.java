@@ -2,7 +2,9 @@ package dev.nearlimit.decoders.ldpc;
 
 import dev.nearlimit.codes.batch.FrameBatch;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
+import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.decoders.batch.LlrBatch;
+import dev.nearlimit.numerics.kernels.DecoderKernels;
 
 /**
  * Belief propagation in single precision with any check rule. A check reads from each of its bits t = posterior - its own
@@ -50,6 +52,13 @@ final class FloatBeliefPropagation extends BeliefPropagation {
         this.incoming = new float[runs.largestDegree()][touched.length];
     }
 
+    /** A decoder that gives the same on kernels. */
+    static Decoder on(DecoderKernels kernels, SparseBitMatrix matrix, Iterations iterations, FloatChecks checks) {
+        return iterations.schedule() == Schedule.LAYERED
+                ? new LayeredFloat(matrix, iterations, checks, kernels.layeredFloat())
+                : new FloodingFloat(matrix, iterations, checks, kernels);
+    }
+
     @Override
     void load(LlrBatch received, long lanes) {
         starting.choose(lanes);
@@ -94,10 +103,14 @@ final class FloatBeliefPropagation extends BeliefPropagation {
 
     @Override
     long hardDecisions(int position) {
-        int at = position * FrameBatch.FRAMES;
+        return signs(posterior, position * FrameBatch.FRAMES);
+    }
+
+    /** Bit f is 1 exactly where value f of a row that begins at some place has a sign. */
+    static long signs(float[] values, int at) {
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f++) {
-            word |= (Float.floatToRawIntBits(posterior[at + f]) >>> 31 & 1L) << f;
+            word |= (Float.floatToRawIntBits(values[at + f]) >>> 31 & 1L) << f;
         }
         return word;
     }

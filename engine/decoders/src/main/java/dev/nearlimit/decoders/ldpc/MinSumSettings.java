@@ -8,7 +8,10 @@ import dev.nearlimit.decoders.DecoderSettings;
 import dev.nearlimit.decoders.InvalidDecoderException;
 import dev.nearlimit.decoders.OperationCount;
 import dev.nearlimit.decoders.Quantiser;
+import dev.nearlimit.numerics.kernels.DecoderKernels;
+import dev.nearlimit.numerics.kernels.FloatCorrection;
 import dev.nearlimit.numerics.kernels.Kernels;
+import dev.nearlimit.numerics.kernels.LayeredFloatKernels;
 import dev.nearlimit.numerics.kernels.LayeredMinSumKernels;
 import dev.nearlimit.numerics.kernels.MinSumArithmetic;
 import java.util.Optional;
@@ -63,10 +66,7 @@ public record MinSumSettings(Iterations iterations, MagnitudeCorrection correcti
     public Decoder newDecoder(Code code, Quantiser quantiser) {
         SparseBitMatrix matrix = code.parityCheck();
         if (words.isEmpty()) {
-            RowRuns runs = new RowRuns(matrix);
-            FloatCheckRule rule =
-                    new MinSumCheckRule(correction, runs.largestDegree(), RowRuns.MOST_ROWS * FrameBatch.FRAMES);
-            return new FloatBeliefPropagation(matrix, iterations, runs, rule);
+            return singlePrecision(matrix, Kernels.decoders());
         }
         if (quantiser.wordBits() == 0) {
             throw new InvalidDecoderException(NAME + " in fixed point needs a quantiser before it, found none");
@@ -76,12 +76,32 @@ public record MinSumSettings(Iterations iterations, MagnitudeCorrection correcti
                     + words.get().posterior() + " bits, too short for levels up to " + quantiser.largestLevel()
                     + " of the quantiser");
         }
-        return fixedPoint(matrix, words.get(), Kernels.layeredMinSum());
+        return fixedPoint(matrix, words.get(), Kernels.decoders());
+    }
+
+    /** The single-precision decoder on the given kernels, or without any; the results are the same. */
+    Decoder singlePrecision(SparseBitMatrix matrix, Optional<DecoderKernels> kernels) {
+        if (kernels.isPresent()) {
+            LayeredFloatKernels checks = kernels.get().layeredFloat();
+            FloatCorrection floats = new FloatCorrection(
+                    correction instanceof MagnitudeCorrection.Scale scale ? scale.eighths() * 0.125f : 1f,
+                    correction instanceof MagnitudeCorrection.Offset offset ? offset.amount() : 0f,
+                    FloatBeliefPropagation.LARGEST);
+            return FloatBeliefPropagation.on(
+                    kernels.get(),
+                    matrix,
+                    iterations,
+                    (run, posterior, message, scratch) -> checks.minSum(run, floats, posterior, message, scratch));
+        }
+        RowRuns runs = new RowRuns(matrix);
+        FloatCheckRule rule =
+                new MinSumCheckRule(correction, runs.largestDegree(), RowRuns.MOST_ROWS * FrameBatch.FRAMES);
+        return new FloatBeliefPropagation(matrix, iterations, runs, rule);
     }
 
     /** The fixed-point decoder on the given kernels, or without any; the results are the same. */
-    Decoder fixedPoint(SparseBitMatrix matrix, WordLengths words, Optional<LayeredMinSumKernels> kernels) {
-        if (iterations.schedule() != Schedule.LAYERED || kernels.isEmpty()) {
+    Decoder fixedPoint(SparseBitMatrix matrix, WordLengths words, Optional<DecoderKernels> kernels) {
+        if (kernels.isEmpty()) {
             return new FixedPointBeliefPropagation(matrix, iterations, words, correction);
         }
         MinSumArithmetic arithmetic = new MinSumArithmetic(
@@ -89,9 +109,19 @@ public record MinSumSettings(Iterations iterations, MagnitudeCorrection correcti
                 words.largestPosterior(),
                 correction instanceof MagnitudeCorrection.Scale scale ? scale.eighths() : 8,
                 correction instanceof MagnitudeCorrection.Offset offset ? (int) offset.amount() : 0);
+        if (iterations.schedule() == Schedule.LAYERED) {
+            LayeredMinSumKernels checks = kernels.get().layeredMinSum();
+            return arithmetic.fitsBytes()
+                    ? new ByteLayeredMinSum(matrix, iterations, arithmetic, checks)
+                    : new ShortLayeredMinSum(matrix, iterations, arithmetic, checks);
+        }
+        FloodingPasses passes = new FloodingPasses(matrix);
+        if (passes.largestSum(words) > Short.MAX_VALUE) {
+            return new FixedPointBeliefPropagation(matrix, iterations, words, correction);
+        }
         return arithmetic.fitsBytes()
-                ? new ByteLayeredMinSum(matrix, iterations, arithmetic, kernels.get())
-                : new ShortLayeredMinSum(matrix, iterations, arithmetic, kernels.get());
+                ? new ByteFloodingMinSum(matrix, iterations, arithmetic, passes, kernels.get())
+                : new ShortFloodingMinSum(matrix, iterations, arithmetic, passes, kernels.get());
     }
 
     /**

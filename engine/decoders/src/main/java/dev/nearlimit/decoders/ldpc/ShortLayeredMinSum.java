@@ -80,7 +80,8 @@ final class ShortLayeredMinSum extends BeliefPropagation {
         return signs(posterior, position * FrameBatch.FRAMES);
     }
 
-    private static long signs(short[] values, int at) {
+    /** Bit f is 1 exactly where value f of a row that begins at some place is below 0. */
+    static long signs(short[] values, int at) {
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f++) {
             word |= (values[at + f] >>> 31 & 1L) << f;

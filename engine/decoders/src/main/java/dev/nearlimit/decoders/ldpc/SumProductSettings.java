@@ -7,9 +7,14 @@ import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.decoders.DecoderSettings;
 import dev.nearlimit.decoders.OperationCount;
 import dev.nearlimit.decoders.Quantiser;
+import dev.nearlimit.numerics.kernels.DecoderKernels;
+import dev.nearlimit.numerics.kernels.Kernels;
+import dev.nearlimit.numerics.kernels.LayeredFloatKernels;
+import java.util.Optional;
 
 /**
- * Sum-product decoding (Gallager 1962) in single precision, with the check rule of {@link SumProductCheckRule}. A
+ * Sum-product decoding (Gallager 1962) in single precision, with the check rule of {@link SumProductCheckRule}: a message
+ * of a row of weight d is within (d - 2) * 1.1e-4 of the exact rule on the values read, before both are limited. A
  * quantiser in front acts on the channel's LLRs alone.
  */
 public record SumProductSettings(Iterations iterations) implements DecoderSettings {
@@ -37,7 +42,20 @@ public record SumProductSettings(Iterations iterations) implements DecoderSettin
 
     @Override
     public Decoder newDecoder(Code code, Quantiser quantiser) {
-        SparseBitMatrix matrix = code.parityCheck();
+        return decoder(code.parityCheck(), Kernels.decoders());
+    }
+
+    /** The decoder on the given kernels, or without any; the results are the same. */
+    Decoder decoder(SparseBitMatrix matrix, Optional<DecoderKernels> kernels) {
+        if (kernels.isPresent()) {
+            LayeredFloatKernels checks = kernels.get().layeredFloat();
+            return FloatBeliefPropagation.on(
+                    kernels.get(),
+                    matrix,
+                    iterations,
+                    (run, posterior, message, scratch) ->
+                            checks.sumProduct(run, FloatBeliefPropagation.LARGEST, posterior, message, scratch));
+        }
         RowRuns runs = new RowRuns(matrix);
         FloatCheckRule rule = new SumProductCheckRule(runs.largestDegree(), RowRuns.MOST_ROWS * FrameBatch.FRAMES);
         return new FloatBeliefPropagation(matrix, iterations, runs, rule);

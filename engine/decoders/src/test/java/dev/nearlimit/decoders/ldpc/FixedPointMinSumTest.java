@@ -62,7 +62,7 @@ class FixedPointMinSumTest {
         List<Decoder> decoders = List.of(
                 settings.newDecoder(code, quantiser),
                 settings.fixedPoint(matrix, words, Optional.empty()),
-                settings.fixedPoint(matrix, words, Kernels.layeredMinSum()));
+                settings.fixedPoint(matrix, words, Kernels.decoders()));
         SingleFrameMinSum twin = new SingleFrameMinSum(matrix, words, correction);
         LlrBatch batch = new LlrBatch(matrix.columns());
         int rail = quantiser.largestLevel();

@@ -14,6 +14,7 @@ import dev.nearlimit.decoders.batch.DecodedBatch;
 import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.numerics.kernels.Kernels;
 import java.lang.management.ManagementFactory;
+import java.util.Arrays;
 import java.util.Optional;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
@@ -25,6 +26,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class NarrowLanesTest {
     private static final Iterations EARLY = new Iterations(12, Schedule.LAYERED, true);
     private static final Iterations ALL = new Iterations(7, Schedule.LAYERED, false);
+    private static final Iterations FLOODING = new Iterations(9, Schedule.FLOODING, true);
 
     /** All pairs of word lengths, so that every limit and the border between the widths of lanes is met. */
     @ParameterizedTest
@@ -48,6 +50,7 @@ class NarrowLanesTest {
             }
             compare(matrix, words, correction, EARLY, batch, seed);
             compare(matrix, words, correction, ALL, batch, seed);
+            compare(matrix, words, correction, FLOODING, batch, seed);
         }
     }
 
@@ -66,10 +69,38 @@ class NarrowLanesTest {
         MagnitudeCorrection correction =
                 eighths < 8 ? new MagnitudeCorrection.Scale(eighths) : new MagnitudeCorrection.Offset(offset);
         Decoder decoder = new MinSumSettings(EARLY, correction, Optional.of(words))
-                .fixedPoint(code.parityCheck(), words, Kernels.layeredMinSum());
+                .fixedPoint(code.parityCheck(), words, Kernels.decoders());
         assertEquals(bitsOfLane == 8 ? ByteLayeredMinSum.class : ShortLayeredMinSum.class, decoder.getClass());
         compare(code.parityCheck(), words, correction, EARLY, batch, "seed " + posterior);
         compare(code.parityCheck(), words, correction, ALL, batch, "seed " + posterior);
+        Decoder flooding = new MinSumSettings(FLOODING, correction, Optional.of(words))
+                .fixedPoint(code.parityCheck(), words, Kernels.decoders());
+        assertEquals(bitsOfLane == 8 ? ByteFloodingMinSum.class : ShortFloodingMinSum.class, flooding.getClass());
+        compare(code.parityCheck(), words, correction, FLOODING, batch, "seed " + posterior);
+    }
+
+    /** A bit of 256 rows may sum up to 127 + 256 * 127 = 32639, which 16 bits hold; one of 260 rows may not. */
+    @ParameterizedTest
+    @CsvSource({"256, true", "260, false"})
+    void floodingKeepsItsSumsExact(int rows, boolean narrow) {
+        int[][] ones = new int[rows][];
+        for (int row = 0; row < rows; row++) {
+            ones[row] = new int[] {0, 1 + row};
+        }
+        SparseBitMatrix matrix = SparseBitMatrix.ofRows(1 + rows, ones);
+        WordLengths words = new WordLengths(8, 8);
+        MagnitudeCorrection none = new MagnitudeCorrection.Scale(8);
+        Iterations iterations = new Iterations(1, Schedule.FLOODING, false);
+        LlrBatch batch = new LlrBatch(matrix.columns());
+        Arrays.fill(batch.levels(), (byte) -127);
+        Decoder decoder =
+                new MinSumSettings(iterations, none, Optional.of(words)).fixedPoint(matrix, words, Kernels.decoders());
+        assertEquals(narrow ? ShortFloodingMinSum.class : FixedPointBeliefPropagation.class, decoder.getClass());
+        DecodedBatch decoded = new DecodedBatch(matrix.columns());
+        decoder.decode(batch, decoded);
+        for (long bits : decoded.bits()) {
+            assertEquals(-1L, bits);
+        }
     }
 
     /**
@@ -105,12 +136,12 @@ class NarrowLanesTest {
             Iterations iterations,
             LlrBatch batch,
             String seed) {
-        assertTrue(Kernels.layeredMinSum().isPresent(), "this test needs --add-modules jdk.incubator.vector");
+        assertTrue(Kernels.decoders().isPresent(), "this test needs --add-modules jdk.incubator.vector");
         MinSumSettings settings = new MinSumSettings(iterations, correction, Optional.of(words));
         DecodedBatch expected = new DecodedBatch(matrix.columns());
         DecodedBatch found = new DecodedBatch(matrix.columns());
         settings.fixedPoint(matrix, words, Optional.empty()).decode(batch, expected);
-        settings.fixedPoint(matrix, words, Kernels.layeredMinSum()).decode(batch, found);
+        settings.fixedPoint(matrix, words, Kernels.decoders()).decode(batch, found);
         String where = seed + ", " + settings.designator();
         assertArrayEquals(expected.bits(), found.bits(), where);
         assertArrayEquals(expected.iterations(), found.iterations(), where);

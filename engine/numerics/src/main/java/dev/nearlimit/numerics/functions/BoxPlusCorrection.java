@@ -16,13 +16,17 @@ public final class BoxPlusCorrection {
     /** Bound on the absolute error. */
     public static final float MAX_ERROR = 5e-5f;
 
-    private static final float LIMIT = 12f;
-    private static final float C5 = 6.694848e-6f;
-    private static final float C4 = -2.1222944e-4f;
-    private static final float C3 = 2.2530386e-3f;
-    private static final float C2 = -6.3993554e-3f;
-    private static final float C1 = -8.592438e-2f;
-    private static final float C0 = 0.95521116f;
+    /** Beyond this x the value stays what it is there. */
+    public static final float LIMIT = 12f;
+
+    /** Coefficient of y^5, y = min(x, {@link #LIMIT}); the following ones are those of the lower powers. */
+    public static final float C5 = 6.694848e-6f;
+
+    public static final float C4 = -2.1222944e-4f;
+    public static final float C3 = 2.2530386e-3f;
+    public static final float C2 = -6.3993554e-3f;
+    public static final float C1 = -8.592438e-2f;
+    public static final float C0 = 0.95521116f;
 
     private BoxPlusCorrection() {}
 

@@ -5,6 +5,6 @@ import java.util.Optional;
 /**
  * Kernels that are chosen together.
  *
- * @param layeredMinSum empty where decoders do better with loops of their own
+ * @param decoders empty where decoders do better with loops of their own
  */
-record KernelSet(NoiseKernels noise, ReceptionKernels reception, Optional<LayeredMinSumKernels> layeredMinSum) {}
+record KernelSet(NoiseKernels noise, ReceptionKernels reception, Optional<DecoderKernels> decoders) {}

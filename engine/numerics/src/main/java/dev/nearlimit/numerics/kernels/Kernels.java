@@ -30,11 +30,11 @@ public final class Kernels {
     }
 
     /**
-     * The kernels of layered fixed-point min-sum; empty in plain Java, where narrow lanes gain nothing and the decoder's
-     * own loops, with lanes of 32 bits, are what the JIT makes SIMD of.
+     * The kernels of decoders; empty in plain Java, where narrow lanes gain nothing and the decoders' own loops are laid
+     * out so that the JIT makes SIMD of them.
      */
-    public static Optional<LayeredMinSumKernels> layeredMinSum() {
-        return SET.layeredMinSum();
+    public static Optional<DecoderKernels> decoders() {
+        return SET.decoders();
     }
 
     /** What runs, for reports: {@code plain}, or {@code vector 256-bit} with the width of the registers in use. */

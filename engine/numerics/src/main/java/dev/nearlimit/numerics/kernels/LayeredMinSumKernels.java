@@ -37,6 +37,13 @@ public interface LayeredMinSumKernels {
     void addUnsatisfied(CheckRun run, byte[] posterior, byte[] found);
 
     /**
+     * Bit f of bits[i] becomes 1 exactly where posterior[64*i + f] is negative.
+     *
+     * @param scratch 512 values whose contents do not matter
+     */
+    void signs(byte[] posterior, long[] bits, long[] scratch);
+
+    /**
      * Starts lanes: their posteriors become the received levels, others stay.
      *
      * @param keep a row of 64 lanes, 0 for lanes that start, all ones for others

@@ -7,7 +7,8 @@ final class VectorKernels {
     private VectorKernels() {}
 
     static KernelSet all() {
-        return new KernelSet(
-                new VectorNoiseKernels(), new VectorReceptionKernels(), Optional.of(new VectorMinSumKernels()));
+        DecoderKernels decoders =
+                new DecoderKernels(new VectorMinSumKernels(), new VectorFloatKernels(), new VectorBitSums());
+        return new KernelSet(new VectorNoiseKernels(), new VectorReceptionKernels(), Optional.of(decoders));
     }
 }

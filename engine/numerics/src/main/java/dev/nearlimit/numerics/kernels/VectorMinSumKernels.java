@@ -43,4 +43,9 @@ final class VectorMinSumKernels implements LayeredMinSumKernels {
     public void start(byte[] posterior, byte[] received, byte[] keep) {
         ByteMinSum.start(posterior, received, keep);
     }
+
+    @Override
+    public void signs(byte[] posterior, long[] bits, long[] scratch) {
+        SignBits.gather(posterior, bits, scratch);
+    }
 }
