@@ -3,14 +3,11 @@ package dev.nearlimit.numerics.kernels;
 import static jdk.incubator.vector.VectorOperators.ABS;
 import static jdk.incubator.vector.VectorOperators.AND;
 import static jdk.incubator.vector.VectorOperators.GT;
-import static jdk.incubator.vector.VectorOperators.LSHL;
-import static jdk.incubator.vector.VectorOperators.LSHR;
 import static jdk.incubator.vector.VectorOperators.LT;
 import static jdk.incubator.vector.VectorOperators.OR;
 import static jdk.incubator.vector.VectorOperators.XOR;
 
 import jdk.incubator.vector.ByteVector;
-import jdk.incubator.vector.ShortVector;
 import jdk.incubator.vector.VectorSpecies;
 
 /**
@@ -128,8 +125,8 @@ final class ByteMinSum {
             ByteVector least = ByteVector.fromArray(LANES, scratch, l);
             ByteVector second = ByteVector.fromArray(LANES, scratch, l + lanes);
             if (eighths != 8) {
-                least = scaled(least, (short) eighths);
-                second = scaled(second, (short) eighths);
+                least = LaneMath.scaled(least, (short) eighths);
+                second = LaneMath.scaled(second, (short) eighths);
             }
             least = least.sub(offset).max((byte) 0);
             second = second.sub(offset).max((byte) 0);
@@ -137,14 +134,6 @@ final class ByteMinSum {
             second.blend(second.neg(), negative).intoArray(scratch, l + lanes);
             least.blend(least.neg(), negative).intoArray(scratch, l + 2 * lanes);
         }
-    }
-
-    /** floor(eighths * m / 8) of magnitudes, in the two bytes of 16-bit lanes: processors do not multiply bytes. */
-    private static ByteVector scaled(ByteVector m, short eighths) {
-        ShortVector pairs = m.reinterpretAsShorts();
-        ShortVector even = pairs.lanewise(AND, (short) 0xFF).mul(eighths).lanewise(LSHR, 3);
-        ShortVector odd = pairs.lanewise(LSHR, 8).mul(eighths).lanewise(LSHR, 3);
-        return odd.lanewise(LSHL, 8).lanewise(OR, even).reinterpretAsBytes();
     }
 
     private static void send(

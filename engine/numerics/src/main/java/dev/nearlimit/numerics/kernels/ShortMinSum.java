@@ -3,7 +3,6 @@ package dev.nearlimit.numerics.kernels;
 import static jdk.incubator.vector.VectorOperators.ABS;
 import static jdk.incubator.vector.VectorOperators.AND;
 import static jdk.incubator.vector.VectorOperators.GT;
-import static jdk.incubator.vector.VectorOperators.LSHR;
 import static jdk.incubator.vector.VectorOperators.LT;
 import static jdk.incubator.vector.VectorOperators.OR;
 import static jdk.incubator.vector.VectorOperators.XOR;
@@ -131,8 +130,8 @@ final class ShortMinSum {
             ShortVector least = ShortVector.fromArray(LANES, scratch, l);
             ShortVector second = ShortVector.fromArray(LANES, scratch, l + lanes);
             if (eighths != 8) {
-                least = scaled(least, (short) eighths);
-                second = scaled(second, (short) eighths);
+                least = LaneMath.scaled(least, (short) eighths);
+                second = LaneMath.scaled(second, (short) eighths);
             }
             least = least.sub(offset).max((short) 0);
             second = second.sub(offset).max((short) 0);
@@ -140,11 +139,6 @@ final class ShortMinSum {
             second.blend(second.neg(), negative).intoArray(scratch, l + lanes);
             least.blend(least.neg(), negative).intoArray(scratch, l + 2 * lanes);
         }
-    }
-
-    /** floor(eighths * m / 8) of magnitudes. */
-    private static ShortVector scaled(ShortVector m, short eighths) {
-        return m.mul(eighths).lanewise(LSHR, 3);
     }
 
     private static void send(

@@ -26,8 +26,6 @@ final class VectorNoiseKernels implements NoiseKernels {
     private static final int LANES = 64;
     private static final float ANGLE_UNIT = (float) (Math.PI / 4 / 2147483648.0);
     private static final int SIGN = 0x80000000;
-    private static final int SQRT_HALF_BITS = 0x3f3504f3;
-    private static final float LN_2 = 0.69314718056f;
 
     private static final long UPPER_HALF = 0xFFFFFFFF00000000L;
     private static final long LOWER_HALF = 0x00000000FFFFFFFFL;
@@ -127,41 +125,9 @@ final class VectorNoiseKernels implements NoiseKernels {
         for (int i = 0; i < count; i += INTS.length()) {
             IntVector draw = IntVector.fromArray(INTS, high, i);
             signs = signs.lanewise(OR, draw.lanewise(LSHR, 7).sub(1));
-            radiusOf(draw.lanewise(LSHR, 1)).intoArray(radius, i);
+            LaneMath.radius(draw.lanewise(LSHR, 1)).intoArray(radius, i);
         }
         return signs.reduceLanes(OR) < 0;
-    }
-
-    private static FloatVector radiusOf(IntVector cell) {
-        FloatVector w = ((FloatVector) cell.convert(I2F, 0)).add(0.5f);
-        IntVector bits = w.viewAsIntegralLanes();
-        IntVector e = bits.sub(SQRT_HALF_BITS).lanewise(ASHR, 23);
-        FloatVector m = bits.sub(e.lanewise(LSHL, 23)).viewAsFloatingLanes().sub(1f);
-        FloatVector exponent = ((FloatVector) e.convert(I2F, 0)).sub(31f).mul(LN_2);
-        FloatVector z = m.mul(m);
-        FloatVector ln =
-                logarithmPolynomial(m).mul(m).mul(z).sub(z.mul(0.5f)).add(m).add(exponent);
-        // As integers, floats below zero and -0 are below 0, so this is the maximum with +0 of plain Java.
-        return ln.mul(-2f).viewAsIntegralLanes().max(0).viewAsFloatingLanes().sqrt();
-    }
-
-    private static FloatVector logarithmPolynomial(FloatVector m) {
-        return m.mul(7.0376836292E-2f)
-                .add(-1.1514610310E-1f)
-                .mul(m)
-                .add(1.1676998740E-1f)
-                .mul(m)
-                .add(-1.2420140846E-1f)
-                .mul(m)
-                .add(1.4249322787E-1f)
-                .mul(m)
-                .add(-1.6668057665E-1f)
-                .mul(m)
-                .add(2.0000714765E-1f)
-                .mul(m)
-                .add(-2.4999993993E-1f)
-                .mul(m)
-                .add(3.3333331174E-1f);
     }
 
     @Override
@@ -177,33 +143,12 @@ final class VectorNoiseKernels implements NoiseKernels {
             FloatVector r = FloatVector.fromArray(FLOATS, radius, row + l);
             FloatVector t = ((FloatVector) b.lanewise(LSHL, 2).convert(I2F, 0)).mul(ANGLE_UNIT);
             FloatVector t2 = t.mul(t);
-            IntVector x = r.mul(cosine(t2)).viewAsIntegralLanes().lanewise(XOR, b.lanewise(AND, SIGN));
-            IntVector y = r.mul(sine(t, t2)).viewAsIntegralLanes();
+            IntVector x = r.mul(LaneMath.cosine(t2)).viewAsIntegralLanes().lanewise(XOR, b.lanewise(AND, SIGN));
+            IntVector y = r.mul(LaneMath.sine(t, t2)).viewAsIntegralLanes();
             IntVector exchange =
                     x.lanewise(XOR, y).lanewise(AND, b.lanewise(LSHL, 1).lanewise(ASHR, 31));
             x.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, at + l);
             y.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, at + LANES + l);
         }
-    }
-
-    private static FloatVector sine(FloatVector t, FloatVector t2) {
-        return t2.mul(-1.9515295891E-4f)
-                .add(8.3321608736E-3f)
-                .mul(t2)
-                .add(-1.6666654611E-1f)
-                .mul(t2)
-                .mul(t)
-                .add(t);
-    }
-
-    private static FloatVector cosine(FloatVector t2) {
-        return t2.mul(2.443315711809948E-5f)
-                .add(-1.388731625493765E-3f)
-                .mul(t2)
-                .add(4.166664568298827E-2f)
-                .mul(t2)
-                .mul(t2)
-                .sub(t2.mul(0.5f))
-                .add(1f);
     }
 }
