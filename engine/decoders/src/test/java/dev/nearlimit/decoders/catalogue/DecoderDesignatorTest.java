@@ -204,11 +204,7 @@ class DecoderDesignatorTest {
                 "hamming:15,11 | syndrome",
                 "hamming:15,11 | bounded-distance",
                 "bch:15,5 | bounded-distance",
-                "bch:15,5 | maximum-likelihood",
-                "hamming:15,11 | sum-product:schedule=flooding",
-                "hamming:15,11 | sum-product",
-                "hamming:15,11 | min-sum:word=5,schedule=flooding",
-                "hamming:15,11 | min-sum:offset=1"
+                "bch:15,5 | maximum-likelihood"
             })
     void aCallAllocatesNothing(String designator, String decoderDesignator) {
         Code code = Catalogue.standard().build(designator);
