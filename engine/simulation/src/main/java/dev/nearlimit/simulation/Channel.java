@@ -10,11 +10,20 @@ public sealed interface Channel {
     /** Whether Eb/N0 sets the channel; where not, its parameter is fixed and a point carries no Eb/N0. */
     boolean hasEbn0();
 
-    /** White Gaussian noise of variance N0/2 per real dimension; the receiver knows N0. */
-    record Awgn() implements Channel {
+    /**
+     * White Gaussian noise of variance N0/2 per real dimension.
+     *
+     * @param mismatch how far the receiver is off in what it takes N0 and the signal's amplitude for
+     */
+    record Awgn(Mismatch mismatch) implements Channel {
+        /** With a receiver that knows N0 and the amplitude. */
+        public Awgn() {
+            this(Mismatch.NONE);
+        }
+
         @Override
         public String designator() {
-            return "awgn";
+            return mismatch.equals(Mismatch.NONE) ? "awgn" : "awgn:" + mismatch.designator();
         }
 
         @Override
@@ -60,7 +69,7 @@ public sealed interface Channel {
     }
 
     /**
-     * Reads a designator: {@code awgn}, {@code bsc} or {@code bsc:0.01}.
+     * Reads a designator: {@code awgn}, {@code awgn:noise-estimate=1,gain=-0.5}, {@code bsc} or {@code bsc:0.01}.
      *
      * @throws InvalidSimulationException if it names no channel
      */
@@ -68,6 +77,9 @@ public sealed interface Channel {
         String text = designator.trim().toLowerCase(Locale.ROOT);
         if (text.equals("awgn")) {
             return new Awgn();
+        }
+        if (text.startsWith("awgn:")) {
+            return new Awgn(Mismatch.parse(text.substring("awgn:".length())));
         }
         if (text.equals("bsc")) {
             return new HardDecisionAwgn();
@@ -80,6 +92,7 @@ public sealed interface Channel {
                         "crossover probability of channel '" + designator + "' is no number");
             }
         }
-        throw new InvalidSimulationException("unknown channel '" + designator + "'; known are awgn, bsc, bsc:p");
+        throw new InvalidSimulationException("unknown channel '" + designator
+                + "'; known are awgn, bsc, bsc:p; awgn takes " + String.join("=dB and ", Mismatch.SETTINGS) + "=dB");
     }
 }

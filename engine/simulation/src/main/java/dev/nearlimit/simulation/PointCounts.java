@@ -18,4 +18,9 @@ public record PointCounts(
         long bitErrorSquares,
         long undetectedErrors,
         long iterations,
-        boolean complete) {}
+        boolean complete) {
+    /** Frames of which the decoder said that it failed. */
+    public long detectedErrors() {
+        return frameErrors - undetectedErrors;
+    }
+}

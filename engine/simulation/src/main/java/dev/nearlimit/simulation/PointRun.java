@@ -83,18 +83,13 @@ final class PointRun {
         return counter.met();
     }
 
-    /** Works until the run ends; what goes wrong is kept for {@link #counts()}. */
+    /** Works until the run ends; what goes wrong is kept for {@link #outcome()}. */
     void work() {
         try {
             FrameWorker worker = bench.take();
-            PointWorker chain = new PointWorker(worker);
-            for (long block = handOut(); block != NONE; block = handOut()) {
-                Optional<Block> result = chain.findOrCompute(block);
-                if (result.isEmpty()) {
-                    end();
-                } else {
-                    count(block, result.get());
-                }
+            Feed feed = new Feed(streams.newPayload(), streams.newLink());
+            while (feed.await()) {
+                worker.run(feed, feed.payload, feed.link, control);
             }
             bench.giveBack(worker);
         } catch (RuntimeException | Error e) {
@@ -102,33 +97,54 @@ final class PointRun {
         }
     }
 
-    /** A worker with this point's payload and link. */
-    private final class PointWorker {
-        private final FrameWorker worker;
-        private final Payload payload = streams.newPayload();
-        private final Link link = streams.newLink();
+    /** What one worker gets its blocks from and delivers them to, with its payload and link. */
+    private final class Feed implements FrameWorker.BlockFeed {
+        private final Payload payload;
+        private final Link link;
+        private long awaited = NONE;
 
-        PointWorker(FrameWorker worker) {
-            this.worker = worker;
+        Feed(Payload payload, Link link) {
+            this.payload = payload;
+            this.link = link;
         }
 
-        Optional<Block> findOrCompute(long number) {
-            Optional<byte[]> kept = journal.find(job, number);
-            if (kept.isPresent()) {
-                tally.found(job, number);
-                return Optional.of(Block.fromBytes(kept.get()));
+        /** Waits for a block to compute; false when there will be none. */
+        boolean await() {
+            awaited = nextToCompute(true);
+            return awaited != NONE;
+        }
+
+        @Override
+        public long next() {
+            if (awaited == NONE) {
+                return nextToCompute(false);
             }
-            Optional<Block> block = worker.compute(number, payload, link, control);
-            if (block.isPresent()) {
-                journal.keep(job, number, block.get().toBytes());
-                tally.computed(job, number, bench.framesPerBlock());
+            long block = awaited;
+            awaited = NONE;
+            return block;
+        }
+
+        private long nextToCompute(boolean mayWait) {
+            long block = handOut(mayWait);
+            while (block != NONE && countKept(block)) {
+                block = handOut(mayWait);
             }
             return block;
         }
+
+        @Override
+        public void done(long number, Block block) {
+            journal.keep(job, number, block.toBytes());
+            tally.computed(job, number, bench.framesPerBlock());
+            count(number, block);
+        }
     }
 
-    /** The next block to compute; waits for other runs of this point where nothing is left but what they have. */
-    private synchronized long handOut() {
+    /**
+     * The next block to compute. Where nothing is left but what other runs of this point have under way, waits for them;
+     * but a worker that has frames of its own under way must not, since those runs may be waiting for these.
+     */
+    private synchronized long handOut(boolean mayWait) {
         while (!ended && !control.stopRequested()) {
             while (lease.awaits(nextToCount) && !counter.met() && countAwaited()) {
                 // Each round counts one block more.
@@ -142,6 +158,9 @@ final class PointRun {
                 return block;
             }
             if (!lease.extend(nextToCount, limit)) {
+                if (!mayWait) {
+                    break;
+                }
                 pause();
             }
         }
@@ -205,13 +224,13 @@ final class PointRun {
     }
 
     /** What was counted, once all threads have stopped working; throws what any of them threw. */
-    synchronized PointCounts counts() {
+    synchronized PointOutcome outcome() {
         if (failure instanceof RuntimeException e) {
             throw e;
         }
         if (failure instanceof Error e) {
             throw e;
         }
-        return counter.counts();
+        return counter.outcome();
     }
 }

@@ -48,9 +48,9 @@ final class PointStreams {
         }
         GaussianNoise noise = new GaussianNoise(streams(Stream.NOISE));
         double energy = scheme.energyPerDimensionOverN0(point.ebn0Db());
-        return channel instanceof Channel.HardDecisionAwgn
-                ? new HardDecisionLink(noise, energy)
-                : new GaussianLink(noise, energy);
+        return channel instanceof Channel.Awgn soft
+                ? new GaussianLink(noise, energy, soft.mismatch().llrFactor())
+                : new HardDecisionLink(noise, energy);
     }
 
     private FrameStreams streams(Stream stream) {

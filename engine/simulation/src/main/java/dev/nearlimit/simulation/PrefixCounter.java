@@ -9,6 +9,9 @@ final class PrefixCounter {
     private long bitErrorSquares;
     private long undetectedErrors;
     private long iterations;
+    private final Histogram.Counter iterationsOfFrames = new Histogram.Counter();
+    private final Histogram.Counter bitErrorsOfFailures = new Histogram.Counter();
+    private final FailedFrames.Recorder failedFrames = new FailedFrames.Recorder();
 
     PrefixCounter(StoppingRule rule) {
         this.rule = rule;
@@ -28,9 +31,12 @@ final class PrefixCounter {
             bitErrors += wrong;
             bitErrorSquares += wrong * wrong;
             undetectedErrors += block.undetected()[i] ? 1 : 0;
+            bitErrorsOfFailures.add(block.bitErrors()[i]);
+            failedFrames.add(frames + block.failed()[i]);
         }
         for (int f = 0; f < Math.min(end, block.iterations().length); f++) {
             iterations += block.iterations()[f];
+            iterationsOfFrames.add(block.iterations()[f]);
         }
         frames += end;
         frameErrors += failures;
@@ -42,5 +48,13 @@ final class PrefixCounter {
 
     PointCounts counts() {
         return new PointCounts(frames, frameErrors, bitErrors, bitErrorSquares, undetectedErrors, iterations, met());
+    }
+
+    PointOutcome outcome() {
+        return new PointOutcome(
+                counts(),
+                iterationsOfFrames.toHistogram(),
+                bitErrorsOfFailures.toHistogram(),
+                failedFrames.toFailedFrames(frames));
     }
 }

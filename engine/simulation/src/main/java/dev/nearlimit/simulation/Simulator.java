@@ -81,6 +81,16 @@ public final class Simulator {
      * @throws dev.nearlimit.decoders.InvalidDecoderException if the decoder does not fit the code or the quantiser
      */
     public PointCounts run(Scheme scheme, Point point, long seed, StoppingRule rule, RunControl control) {
+        return measure(scheme, point, seed, rule, control).counts();
+    }
+
+    /**
+     * As {@link #run}, with all that was seen beside the counts: histograms, and which frames failed.
+     *
+     * @throws InvalidSimulationException if the point does not fit the channel
+     * @throws dev.nearlimit.decoders.InvalidDecoderException if the decoder does not fit the code or the quantiser
+     */
+    public PointOutcome measure(Scheme scheme, Point point, long seed, StoppingRule rule, RunControl control) {
         PointStreams streams = new PointStreams(scheme, point, seed);
         SchemeBench bench = bench(scheme);
         ContentHash job = bench.jobKey(point, seed);
@@ -88,7 +98,7 @@ public final class Simulator {
         PointRun run = new PointRun(bench, streams, journal, job, rule, control, tally);
         run.countKept();
         if (run.met()) {
-            return run.counts();
+            return run.outcome();
         }
         List<Future<?>> started = new ArrayList<>();
         for (int t = 1; t < threads; t++) {
@@ -97,7 +107,7 @@ public final class Simulator {
         run.work();
         await(started, run);
         run.close();
-        return run.counts();
+        return run.outcome();
     }
 
     /** Where the blocks came from, over all runs so far. */

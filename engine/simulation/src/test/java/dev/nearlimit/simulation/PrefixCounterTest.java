@@ -32,10 +32,30 @@ class PrefixCounterTest {
                 counter.add(block);
             }
         }
-        assertEquals(walk(blocks, rule), counter.counts(), "seed " + seed);
+        assertEquals(walk(blocks, rule), counter.outcome(), "seed " + seed);
+        assertEquals(counter.outcome().counts(), counter.counts(), "seed " + seed);
     }
 
-    private static PointCounts walk(List<Block> blocks, StoppingRule rule) {
+    private static PointOutcome walk(List<Block> blocks, StoppingRule rule) {
+        long[] iterationsOfFrames = new long[1000];
+        long[] bitErrorsOfFailures = new long[1000];
+        List<Long> failures = new ArrayList<>();
+        PointCounts counts = walk(blocks, rule, iterationsOfFrames, bitErrorsOfFailures, failures);
+        return new PointOutcome(
+                counts,
+                Histogram.of(iterationsOfFrames),
+                Histogram.of(bitErrorsOfFailures),
+                FailedFrames.of(
+                        counts.frames(),
+                        failures.stream().mapToLong(Long::longValue).toArray()));
+    }
+
+    private static PointCounts walk(
+            List<Block> blocks,
+            StoppingRule rule,
+            long[] iterationsOfFrames,
+            long[] bitErrorsOfFailures,
+            List<Long> failures) {
         long frames = 0;
         long errors = 0;
         long bits = 0;
@@ -48,13 +68,18 @@ class PrefixCounterTest {
                     return new PointCounts(frames, errors, bits, squares, undetected, iterations, true);
                 }
                 frames++;
-                iterations += block.iterations().length > 0 ? block.iterations()[f] : 0;
+                if (block.iterations().length > 0) {
+                    iterations += block.iterations()[f];
+                    iterationsOfFrames[block.iterations()[f]]++;
+                }
                 for (int i = 0; i < block.failed().length; i++) {
                     if (block.failed()[i] == f) {
                         errors++;
                         bits += block.bitErrors()[i];
                         squares += (long) block.bitErrors()[i] * block.bitErrors()[i];
                         undetected += block.undetected()[i] ? 1 : 0;
+                        bitErrorsOfFailures[block.bitErrors()[i]]++;
+                        failures.add(frames - 1);
                     }
                 }
             }

@@ -1,7 +1,6 @@
 package dev.nearlimit.simulation.link;
 
-import dev.nearlimit.codes.batch.FrameBatch;
-import dev.nearlimit.decoders.batch.LlrBatch;
+import dev.nearlimit.numerics.kernels.Kernels;
 import dev.nearlimit.numerics.noise.GaussianNoise;
 
 /**
@@ -11,7 +10,8 @@ import dev.nearlimit.numerics.noise.GaussianNoise;
  * both modulations meet the same noise bit by bit.
  *
  * <p>With E the energy of a dimension over N0 (E = R Eb/N0), sigma = (float) sqrt(1 / (2E)) and the LLR is
- * (float) (4E) * y; sums and products are single precision, each rounded.
+ * (float) (4E) * y; sums and products are single precision, each rounded. A receiver that is mistaken about noise or
+ * amplitude multiplies y by another number, which is all that its mistakes do to antipodal signals.
  */
 public final class GaussianLink implements Link {
     private final GaussianNoise noise;
@@ -19,15 +19,27 @@ public final class GaussianLink implements Link {
     private final float llrOfUnit;
 
     /**
-     * A link for one point.
+     * A link for one point, to a receiver that knows noise and amplitude.
      *
      * @param noise the point's noise
      * @param energyOverN0 energy of a real dimension over N0, linear, above 0
      */
     public GaussianLink(GaussianNoise noise, double energyOverN0) {
+        this(noise, energyOverN0, 1);
+    }
+
+    /**
+     * A link for one point.
+     *
+     * @param noise the point's noise
+     * @param energyOverN0 energy of a real dimension over N0, linear, above 0
+     * @param llrFactor what the receiver's LLRs are of the true ones, linear, above 0: 1 where it knows noise and
+     *     amplitude. The product 4E times this factor is formed in double precision and then rounded
+     */
+    public GaussianLink(GaussianNoise noise, double energyOverN0, double llrFactor) {
         this.noise = noise;
         this.sigma = sigma(energyOverN0);
-        this.llrOfUnit = (float) (4 * energyOverN0);
+        this.llrOfUnit = (float) (4 * energyOverN0 * llrFactor);
     }
 
     /** Standard deviation of the noise in a dimension whose signal is +-1. */
@@ -36,17 +48,13 @@ public final class GaussianLink implements Link {
     }
 
     @Override
-    public void carry(long firstFrame, long[] codeword, LlrBatch received) {
-        float[] values = received.values();
-        noise.fill(firstFrame, values, received.n());
-        for (int i = 0; i < received.n(); i++) {
-            demap(codeword[i], values, i * FrameBatch.FRAMES);
-        }
+    public void start(long firstFrame) {
+        noise.start(firstFrame);
     }
 
-    private void demap(long bits, float[] values, int at) {
-        for (int f = 0; f < FrameBatch.FRAMES; f++) {
-            values[at + f] = (Antipodal.signal(bits, f) + sigma * values[at + f]) * llrOfUnit;
-        }
+    @Override
+    public void carry(long[] codeword, int first, int count, float[] values, int at) {
+        noise.next(values, at, count);
+        Kernels.reception().demap(codeword, first, count, sigma, llrOfUnit, values, at);
     }
 }
