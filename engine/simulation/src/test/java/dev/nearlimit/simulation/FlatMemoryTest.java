@@ -3,6 +3,7 @@ package dev.nearlimit.simulation;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.nearlimit.journal.NoJournal;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
@@ -11,8 +12,11 @@ import org.junit.jupiter.api.io.TempDir;
 
 /** A run of any length takes the memory of a short one. */
 final class FlatMemoryTest {
-    /** Enough for the JVM, SQLite's driver and two workers; a tenth of what the run's blocks would take if kept. */
-    private static final int HEAP_MIB = 10;
+    /**
+     * Enough for the JVM, SQLite's driver and two workers; 15625 blocks of which 56 frames fail would take some 14 MB if a
+     * run held on to them.
+     */
+    private static final int HEAP_MIB = 8;
 
     @TempDir
     Path folder;
@@ -28,13 +32,7 @@ final class FlatMemoryTest {
         Process again = LongRunProcess.start(HEAP_MIB, folder, journal, LongRunProcess.FRAMES);
         assertEquals(said, new String(again.getInputStream().readAllBytes(), StandardCharsets.UTF_8));
         assertEquals(0, again.waitFor());
-    }
-
-    /** What makes the other test one that can fail: the same run with its blocks kept in memory does not fit. */
-    @Test
-    void theSameRunDoesNotFitWithItsBlocksInMemory() throws IOException, InterruptedException {
-        Process process = LongRunProcess.start(HEAP_MIB, folder, "memory", LongRunProcess.FRAMES);
-        String said = new String(process.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
-        assertTrue(process.waitFor() != 0 && said.contains("OutOfMemoryError"), said);
+        // That JVM has no vector module: plain kernels on two threads against this JVM's on one.
+        assertEquals(LongRunProcess.run(1, new NoJournal(), LongRunProcess.FRAMES) + System.lineSeparator(), said);
     }
 }

@@ -1,7 +1,6 @@
 package dev.nearlimit.simulation;
 
 import dev.nearlimit.journal.Journal;
-import dev.nearlimit.journal.MemoryJournal;
 import dev.nearlimit.journal.SqliteJournal;
 import java.nio.file.Path;
 
@@ -10,19 +9,22 @@ import java.nio.file.Path;
  * beside the heap that its test gives it. Prints the counts.
  */
 final class LongRunProcess {
-    static final Scheme SCHEME = Uncoded.scheme(8, "awgn", true);
-    static final Point POINT = Point.ofEbn0Db(-3);
+    private static final Scheme SCHEME = Uncoded.scheme(8, "awgn", true);
+    private static final Point POINT = Point.ofEbn0Db(-3);
     static final long FRAMES = 1_000_000;
 
     private LongRunProcess() {}
 
-    /** Arguments: the journal's file, or {@code memory}; frames to run. */
+    /** Arguments: the journal's file; frames to run. */
     public static void main(String[] args) {
-        try (Journal journal =
-                args[0].equals("memory") ? new MemoryJournal() : SqliteJournal.open(Path.of(args[0]), "tool 1")) {
-            StoppingRule rule = new StoppingRule(Long.parseLong(args[1]), Long.MAX_VALUE);
-            System.out.println(new Simulator(2, journal, 64).run(SCHEME, POINT, 5, rule, RunControl.none()));
+        try (Journal journal = SqliteJournal.open(Path.of(args[0]), "tool 1")) {
+            System.out.println(run(2, journal, Long.parseLong(args[1])));
         }
+    }
+
+    static PointCounts run(int threads, Journal journal, long frames) {
+        StoppingRule rule = new StoppingRule(frames, Long.MAX_VALUE);
+        return new Simulator(threads, journal, 64).run(SCHEME, POINT, 5, rule, RunControl.none());
     }
 
     /** Starts this class in a JVM of its own with a heap of so many MiB. */

@@ -6,8 +6,6 @@ final class PlainNoiseKernels implements NoiseKernels {
     private static final float ANGLE_UNIT = (float) (Math.PI / 4 / 2147483648.0);
     private static final int SIGN = 0x80000000;
 
-    private final long[] row = new long[LANES];
-
     @Override
     public String name() {
         return "plain";
@@ -42,6 +40,8 @@ final class PlainNoiseKernels implements NoiseKernels {
 
     @Override
     public void halves(long[] state, int[] high, int[] low, int steps) {
+        // Not a field: all threads share these kernels.
+        long[] row = new long[LANES];
         for (int s = 0; s < steps; s++) {
             step(state, row, 0);
             for (int l = 0; l < LANES; l++) {
