@@ -26,7 +26,7 @@ import java.util.List;
  * lies within {@value #DEVIANCE} of its maximum. The 0.95 quantile of chi-squared with one degree of freedom would be 3.84;
  * but a search stops when its interval has become narrow, which it does first where chance made it so, and counts are
  * small: with 3.84 up to 10 % of the intervals missed. With this value 2 to 5 % do, whatever the curve; the tests hold
- * the coverage to 95 %. At the very knee of an error floor a parabola is too stiff, and 7 % miss.
+ * the coverage to 95 %. At the very knee of an error floor a parabola is too stiff: estimates come out a little high there.
  */
 final class WaterfallFit {
     static final double MEAN_BEND = -0.1;
