@@ -4,7 +4,9 @@ import dev.nearlimit.cli.failure.ErrorLine;
 import dev.nearlimit.cli.failure.Failure;
 import dev.nearlimit.cli.journal.DefaultJournal;
 import dev.nearlimit.cli.output.StandardStream;
+import dev.nearlimit.journal.SqliteLibrary;
 import java.io.PrintWriter;
+import java.nio.file.Path;
 import java.util.Optional;
 
 /** Starts the tool. */
@@ -25,8 +27,9 @@ public final class Main {
     }
 
     private static int run(String[] args, StandardStream out, StandardStream err, Interruption interruption) {
-        Session session = new Session(
-                Boolean.getBoolean("nearlimit.terminal"), interruption, Optional.of(DefaultJournal.location()));
+        Path journal = DefaultJournal.location();
+        SqliteLibrary.keepIn(journal.resolveSibling("native"));
+        Session session = new Session(Boolean.getBoolean("nearlimit.terminal"), interruption, Optional.of(journal));
         PrintWriter errors = err.writer();
         int code;
         try {

@@ -120,6 +120,7 @@ final class JournalledCommandsTest {
             }
             process.kill();
             kept = blocksKept();
+            assertEquals(1, librariesBelow(folder), "copies of SQLite's library after round " + round);
         }
         JsonNode resumed = run(command).json();
         JsonNode whole = run(LDPC, "--no-journal", "--threads", "1").json();
@@ -127,6 +128,14 @@ final class JournalledCommandsTest {
         assertEquals(kept, blocks(resumed, "blocksFromJournal"));
         assertEquals(blocks(whole, "blocksComputed"), kept + blocks(resumed, "blocksComputed"));
         assertTrue(kept >= 9 && blocks(resumed, "blocksComputed") > 0, kept + " blocks were kept");
+    }
+
+    /** However often a process is killed: its temporary files, data and journal all lie in this folder. */
+    private static long librariesBelow(Path folder) throws IOException {
+        try (Stream<Path> files = Files.walk(folder)) {
+            return files.filter(file -> file.toString().matches(".*sqlitejdbc.*|.*unpacking.*"))
+                    .count();
+        }
     }
 
     /**

@@ -63,6 +63,7 @@ final class JournalFile implements AutoCloseable {
     static JournalFile open(Path path) {
         String name = path.toString();
         requirePlainFile(path, name);
+        SqliteLibrary.prepare();
         JournalFile file;
         try {
             SQLiteConfig config = new SQLiteConfig();

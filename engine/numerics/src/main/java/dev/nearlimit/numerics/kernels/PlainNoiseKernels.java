@@ -14,41 +14,44 @@ final class PlainNoiseKernels implements NoiseKernels {
     @Override
     public void fill(long[] state, long[] draws, int steps) {
         for (int s = 0; s < steps; s++) {
-            step(state, draws, s * LANES);
-        }
-    }
-
-    private static void step(long[] state, long[] draws, int at) {
-        for (int l = 0; l < LANES; l++) {
-            long s0 = state[l];
-            long s1 = state[LANES + l];
-            long s2 = state[2 * LANES + l];
-            long s3 = state[3 * LANES + l];
-            draws[at + l] = Long.rotateLeft(s0 + s3, 23) + s0;
-            long t = s1 << 17;
-            s2 ^= s0;
-            s3 ^= s1;
-            s1 ^= s2;
-            s0 ^= s3;
-            s2 ^= t;
-            state[l] = s0;
-            state[LANES + l] = s1;
-            state[2 * LANES + l] = s2;
-            state[3 * LANES + l] = Long.rotateLeft(s3, 45);
+            for (int l = 0; l < LANES; l++) {
+                draws[s * LANES + l] = draw(state, l);
+            }
+            step(state);
         }
     }
 
     @Override
     public void halves(long[] state, int[] high, int[] low, int steps) {
-        // Not a field: one instance serves all threads.
-        long[] row = new long[LANES];
+        // No buffer in a field: one instance serves all threads.
         for (int s = 0; s < steps; s++) {
-            step(state, row, 0);
-            for (int l = 0; l < LANES; l++) {
-                long draw = row[(l >> 1) + (l & 1) * (LANES / 2)];
-                high[s * LANES + l] = (int) (draw >>> 32);
-                low[s * LANES + l] = (int) draw;
+            int row = s * LANES;
+            for (int l = 0; l < LANES / 2; l++) {
+                long even = draw(state, l);
+                long odd = draw(state, l + LANES / 2);
+                high[row + 2 * l] = (int) (even >>> 32);
+                high[row + 2 * l + 1] = (int) (odd >>> 32);
+                low[row + 2 * l] = (int) even;
+                low[row + 2 * l + 1] = (int) odd;
             }
+            step(state);
+        }
+    }
+
+    private static long draw(long[] state, int l) {
+        return Long.rotateLeft(state[l] + state[3 * LANES + l], 23) + state[l];
+    }
+
+    private static void step(long[] state) {
+        for (int l = 0; l < LANES; l++) {
+            long s0 = state[l];
+            long s1 = state[LANES + l];
+            long s2 = state[2 * LANES + l] ^ s0;
+            long s3 = state[3 * LANES + l] ^ s1;
+            state[l] = s0 ^ s3;
+            state[LANES + l] = s1 ^ s2;
+            state[2 * LANES + l] = s2 ^ (s1 << 17);
+            state[3 * LANES + l] = Long.rotateLeft(s3, 45);
         }
     }
 

@@ -20,8 +20,15 @@ public final class CurveSearch {
     /** Frame errors that end a point of the coarse bracket: a few dozen. */
     public static final long COARSE_ERRORS = 32;
 
-    /** Frame errors that end a point of the refined bracket. */
-    public static final long REFINED_ERRORS = 120;
+    /** Half of the coarse interval's width that is sought [dB], and what is spent on it at most. */
+    private static final double COARSE_HALF_WIDTH_DB = 0.1;
+
+    private static final long COARSE_BUDGET = 64;
+
+    /** Half of the refined interval's width that is sought [dB], and what is spent on it at most. */
+    private static final double REFINED_HALF_WIDTH_DB = 0.02;
+
+    private static final long REFINED_BUDGET = 150;
 
     /** Codewords that one point may take at most, so that a hopeless point ends. */
     private static final long MOST_FRAMES = 20_000_000;
@@ -60,13 +67,14 @@ public final class CurveSearch {
     }
 
     /**
-     * Brackets the needed Eb/N0 between points at most 0.25 dB apart.
+     * Finds the needed Eb/N0 to about a tenth of a dB.
      *
      * @param startDb where to begin [dB]
      * @param giveUpDb highest Eb/N0 to try [dB]
      */
     public ErrorCurve coarse(double startDb, double giveUpDb) {
-        return simulated(search.bracket(startDb, giveUpDb, COARSE_ERRORS), "coarse");
+        NeededEbn0 found = search.bracket(startDb, giveUpDb, COARSE_ERRORS);
+        return simulated(found.bracketed() ? search.refine(COARSE_HALF_WIDTH_DB, COARSE_BUDGET) : found, "coarse");
     }
 
     /**
@@ -81,9 +89,9 @@ public final class CurveSearch {
                 > targetFer;
     }
 
-    /** Narrows what {@link #coarse} found. */
+    /** Narrows what {@link #coarse} found to a fiftieth of a dB, where the frames suffice that this is worth. */
     public ErrorCurve refined() {
-        return simulated(search.refine(REFINED_ERRORS), "refined");
+        return simulated(search.refine(REFINED_HALF_WIDTH_DB, REFINED_BUDGET), "refined");
     }
 
     /**
@@ -159,14 +167,14 @@ public final class CurveSearch {
                             "target not met up to %.2f dB",
                             found.bracketLow().ebn0Db());
         }
+        List<MeasuredPoint> points = found.points();
         return String.format(
                 Locale.ROOT,
-                "log FER interpolated between %.2f dB (%d errors in %d frames) and %.2f dB (%d in %d)",
-                found.bracketLow().ebn0Db(),
-                found.bracketLow().counts().frameErrors(),
-                found.bracketLow().counts().frames(),
-                found.bracketHigh().ebn0Db(),
-                found.bracketHigh().counts().frameErrors(),
-                found.bracketHigh().counts().frames());
+                "curve fitted to %d points from %.2f to %.2f dB (%d errors in %d frames)",
+                points.size(),
+                points.get(0).ebn0Db(),
+                points.get(points.size() - 1).ebn0Db(),
+                points.stream().mapToLong(point -> point.counts().frameErrors()).sum(),
+                points.stream().mapToLong(point -> point.counts().frames()).sum());
     }
 }

@@ -3,8 +3,6 @@ package dev.nearlimit.simulation.search;
 import dev.nearlimit.simulation.InvalidSimulationException;
 import dev.nearlimit.simulation.PointCounts;
 import dev.nearlimit.simulation.StoppingRule;
-import dev.nearlimit.simulation.statistics.ErrorRateIntervals;
-import dev.nearlimit.simulation.statistics.Interval;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.TreeMap;
@@ -14,28 +12,41 @@ import java.util.TreeMap;
  *
  * <p>{@link #bracket} climbs from below, where errors are plentiful and points are cheap: a point ends after
  * {@code errors} frame errors, or after {@code errors / target} frames, which is enough to know on which side of the
- * target it lies. {@link #refine} then measures two points 0.2 dB apart around the estimate with more errors.
+ * target it lies. {@link #refine} then adds frames in rounds, each at the Eb/N0 where they narrow the estimate most,
+ * until the interval is as narrow as wanted.
  *
- * <p>The estimate interpolates log10 FER linearly between the two points that bracket the target. Its interval is where
- * the broken lines through the upper and through the lower ends of all points' FER intervals cross the target; where no
- * measured point lies surely below the target, points are added until one does. Each point's interval holds with 99 %,
- * so that those of the five points around the target, which alone can move a crossing, hold together with 95 %
- * (Bonferroni), and with them the crossing of the true curve, as far as it is straight between points. What a straight
- * line misses of a curve's bend is not in it: below 0.01 dB over the 0.2 dB of a refined bracket for waterfalls bending
- * by less than 5 decades a squared dB. A point that was cut short decides nothing.
+ * <p>Estimate and interval come from a curve fitted to all points ({@code WaterfallFit}), which says what it assumes.
+ * Every decision depends on counts alone. A point that was cut short decides nothing.
  */
 public final class NeededEbn0Search {
-    private static final ErrorRateIntervals INTERVALS = new ErrorRateIntervals(0.99);
     private static final long BRACKET_GRID_MICRO_DB = 250_000;
+    /** Refined points lie on this grid, or on the finer one where a curve falls by more than half a decade in a step. */
     private static final long REFINED_GRID_MICRO_DB = 50_000;
-    private static final long REFINED_WIDTH_MICRO_DB = 200_000;
-    private static final int MOST_REFINED_SHIFTS = 12;
-    private static final int MOST_POINTS_BEYOND = 6;
+
+    private static final long FINE_GRID_MICRO_DB = 10_000;
+    private static final double STEEP_NATS = 1.2;
+    /** Refined points lie from this far above the target to this far below it [nats of FER]. */
+    private static final double REACH_ABOVE = 3;
+
+    private static final double REACH_BELOW = 1;
+    /** Frames of a round: so many frame errors at the target, and a quarter of all refining so far. */
+    private static final double ERRORS_PER_ROUND = 5;
+
+    private static final double GROWTH_OF_ROUNDS = 0.25;
+    /** How often all points may have to be found on one side of the target before refining is given up. */
+    private static final int MOST_SIDES = 8;
+    /** Frames that tell on which side of the target a point lies, as frame errors at the target. */
+    private static final double ERRORS_THAT_TELL = 6;
+
+    private static final double LEAST_SLOPE = 0.05;
 
     private final ErrorRateMeter meter;
     private final double targetFer;
     private final long mostFrames;
     private final TreeMap<Long, MeasuredPoint> measured = new TreeMap<>();
+    /** The curve behind the last bracketed answer. */
+    private WaterfallFit fit;
+
     private boolean cutShort;
 
     /**
@@ -79,56 +90,86 @@ public final class NeededEbn0Search {
             }
             measure(onGrid((above().microDb() + below().microDb()) / 2e6, BRACKET_GRID_MICRO_DB), errors);
         }
-        makeSureOfBothSides(errors);
         return answer();
-    }
-
-    /** Adds points outwards until one is surely above the target and one surely below it. */
-    private void makeSureOfBothSides(long errors) {
-        for (int added = 0; !cutShort && above() != null && below() != null && added < MOST_POINTS_BEYOND; added++) {
-            MeasuredPoint first = measured.firstEntry().getValue();
-            MeasuredPoint last = measured.lastEntry().getValue();
-            if (interval(first).low() <= targetFer) {
-                measure(first.microDb() - BRACKET_GRID_MICRO_DB, errors);
-            } else if (interval(last).high() >= targetFer) {
-                measure(last.microDb() + BRACKET_GRID_MICRO_DB, errors);
-            } else {
-                return;
-            }
-        }
     }
 
     /**
-     * Narrows a bracket to 0.2 dB with more errors a point.
+     * Narrows a bracket's interval.
      *
-     * @param errors frame errors that end a point
+     * @param halfWidthDb half of the 95 % interval's width that suffices [dB]
+     * @param errors frames to spend at most, as frame errors at the target: errors / target frames
      */
-    public NeededEbn0 refine(long errors) {
-        NeededEbn0 coarse = answer();
-        if (!coarse.bracketed() || cutShort) {
-            return coarse;
+    public NeededEbn0 refine(double halfWidthDb, long errors) {
+        NeededEbn0 answer = answer();
+        if (!answer.bracketed()) {
+            return answer;
         }
-        long low = Math.floorDiv(Math.round(coarse.ebn0Db() * 1e6) - REFINED_WIDTH_MICRO_DB / 2, REFINED_GRID_MICRO_DB)
-                * REFINED_GRID_MICRO_DB;
-        MeasuredPoint lower = measure(low, errors);
-        MeasuredPoint upper = null;
-        for (int shifts = 0; !cutShort && shifts < MOST_REFINED_SHIFTS; shifts++) {
-            if (lower.fer() <= targetFer) {
-                upper = lower;
-                lower = measure(lower.microDb() - REFINED_WIDTH_MICRO_DB, errors);
-            } else if (upper == null || upper.fer() > targetFer) {
-                MeasuredPoint next = measure(lower.microDb() + REFINED_WIDTH_MICRO_DB, errors);
-                if (next.fer() > targetFer) {
-                    lower = next;
-                } else {
-                    upper = next;
-                }
-            } else {
-                makeSureOfBothSides(errors);
-                return between(lower, upper);
+        double budget = errors / targetFer;
+        double spent = 0;
+        for (int sides = 0; !cutShort && sides < MOST_SIDES && (!answer.bracketed() || spent < budget); ) {
+            if (answer.bracketed() && width(answer) <= 2 * halfWidthDb) {
+                break;
+            }
+            double round = ERRORS_PER_ROUND / targetFer + GROWTH_OF_ROUNDS * spent;
+            double frames = Math.ceil(answer.bracketed() ? Math.min(budget - spent, round) : round);
+            sides += answer.bracketed() ? 0 : 1;
+            long at = answer.bracketed() ? mostTelling(frames, answer) : missingSide();
+            MeasuredPoint known = measured.get(at);
+            double more = Math.min(
+                    frames, mostFrames - (known == null ? 0 : known.counts().frames()));
+            if (more < 1) {
+                break;
+            }
+            addFrames(at, (long) more);
+            spent += more;
+            answer = answer();
+        }
+        return answer;
+    }
+
+    private static double width(NeededEbn0 answer) {
+        return answer.highDb() - answer.lowDb();
+    }
+
+    /** Where a point is missing when more frames have brought all points to one side of the target. */
+    private long missingSide() {
+        long step = Math.max(FINE_GRID_MICRO_DB, Math.round(1e6 * REACH_BELOW / fit.slopePerDb()));
+        return below() == null ? measured.firstKey() - step : measured.lastKey() + step;
+    }
+
+    /**
+     * Where so many more frames leave the estimate the least uncertain; while an end of the interval is open, beyond the
+     * crossing on that side.
+     */
+    private long mostTelling(double frames, NeededEbn0 answer) {
+        double slope = fit.slopePerDb();
+        long grid = slope * REFINED_GRID_MICRO_DB / 1e6 > STEEP_NATS ? FINE_GRID_MICRO_DB : REFINED_GRID_MICRO_DB;
+        long first = onGrid(fit.crossingDb() - REACH_ABOVE / slope, grid);
+        long last = onGrid(fit.crossingDb() + REACH_BELOW / slope, grid);
+        if (Double.isInfinite(width(answer))) {
+            return Double.isInfinite(answer.highDb()) ? last : first;
+        }
+        long best = first;
+        double least = Double.POSITIVE_INFINITY;
+        for (long at = first; at <= last; at += grid) {
+            double deviation = fit.deviationDb(at / 1e6, frames);
+            if (deviation < least) {
+                least = deviation;
+                best = at;
             }
         }
-        return answer();
+        return best;
+    }
+
+    private WaterfallFit fit() {
+        MeasuredPoint lower = below();
+        MeasuredPoint upper = above();
+        double atLower = WaterfallFit.eta(lower.fer());
+        double atUpper = WaterfallFit.eta(visibleFer(upper));
+        double slope = Math.max(LEAST_SLOPE, (atLower - atUpper) / (upper.ebn0Db() - lower.ebn0Db()));
+        double start = lower.ebn0Db() + (atLower - WaterfallFit.eta(targetFer)) / slope;
+        double within = Math.max(lower.ebn0Db(), Math.min(upper.ebn0Db(), start));
+        return WaterfallFit.of(targetFer, measured.values(), within, slope);
     }
 
     /** The point measured highest whose FER is above the target, below every point that meets it. */
@@ -171,8 +212,17 @@ public final class NeededEbn0Search {
         if (known != null && known.rule().frameErrors() >= errors) {
             return known;
         }
-        long frames = (long) Math.min(mostFrames, Math.ceil(errors / targetFer));
-        StoppingRule rule = new StoppingRule(Math.max(1, frames), errors);
+        long frames = (long) Math.min(mostFrames, Math.ceil(Math.min(errors, ERRORS_THAT_TELL) / targetFer));
+        return measure(microDb, new StoppingRule(Math.max(1, frames), errors));
+    }
+
+    private void addFrames(long microDb, long frames) {
+        MeasuredPoint known = measured.get(microDb);
+        long before = known == null ? 0 : known.counts().frames();
+        measure(microDb, new StoppingRule(before + frames, Long.MAX_VALUE));
+    }
+
+    private MeasuredPoint measure(long microDb, StoppingRule rule) {
         PointCounts counts = meter.measure(microDb, rule);
         MeasuredPoint point = new MeasuredPoint(microDb, counts, rule);
         if (counts.complete()) {
@@ -188,7 +238,8 @@ public final class NeededEbn0Search {
         MeasuredPoint lower = below();
         MeasuredPoint upper = above();
         if (lower != null && upper != null) {
-            return between(lower, upper);
+            fit = fit();
+            return new NeededEbn0(fit.crossingDb(), fit.lowDb(), fit.highDb(), lower, upper, points, !cutShort);
         }
         double known = points.isEmpty()
                 ? Double.NaN
@@ -203,72 +254,9 @@ public final class NeededEbn0Search {
                 !cutShort);
     }
 
-    private NeededEbn0 between(MeasuredPoint lower, MeasuredPoint upper) {
-        double x0 = lower.ebn0Db();
-        double x1 = upper.ebn0Db();
-        double atLower = Math.log10(lower.fer());
-        double atUpper = Math.log10(visibleFer(upper));
-        double slope = (atUpper - atLower) / (x1 - x0);
-        double estimate = x0 + (Math.log10(targetFer) - atLower) / slope;
-        return new NeededEbn0(
-                estimate,
-                Math.min(lowEnd(), estimate),
-                Math.max(highEnd(), estimate),
-                lower,
-                upper,
-                new ArrayList<>(measured.values()),
-                !cutShort);
-    }
-
-    /** Where the line through the lower ends first meets the target. */
-    private double lowEnd() {
-        MeasuredPoint before = null;
-        for (MeasuredPoint point : measured.values()) {
-            double low = interval(point).low();
-            if (low <= targetFer) {
-                return before == null
-                        ? Double.NEGATIVE_INFINITY
-                        : crossing(before.ebn0Db(), interval(before).low(), point.ebn0Db(), low);
-            }
-            before = point;
-        }
-        return Double.POSITIVE_INFINITY;
-    }
-
-    /** Where the line through the upper ends last meets the target. */
-    private double highEnd() {
-        MeasuredPoint after = null;
-        for (MeasuredPoint point : measured.descendingMap().values()) {
-            double high = interval(point).high();
-            if (high >= targetFer) {
-                return after == null
-                        ? Double.POSITIVE_INFINITY
-                        : crossing(
-                                point.ebn0Db(),
-                                high,
-                                after.ebn0Db(),
-                                interval(after).high());
-            }
-            after = point;
-        }
-        return Double.NEGATIVE_INFINITY;
-    }
-
-    private static Interval interval(MeasuredPoint point) {
-        return INTERVALS.frameErrorRate(point.counts(), point.rule());
-    }
-
     /** FER of a point, half a frame error standing in for none, since the logarithm needs something. */
     private static double visibleFer(MeasuredPoint point) {
         return Math.max(point.fer(), 0.5 / point.counts().frames());
-    }
-
-    /** Where the straight line of log FER through both points meets the target, which lies between them. */
-    private double crossing(double x0, double fer0, double x1, double fer1) {
-        // A lower end of 0 has no logarithm; far below everything, it leaves the crossing near the other point.
-        double y0 = Math.log10(Math.max(fer0, Double.MIN_NORMAL));
-        double y1 = Math.log10(Math.max(fer1, Double.MIN_NORMAL));
-        return x0 + (Math.log10(targetFer) - y0) / ((y1 - y0) / (x1 - x0));
     }
 
     private static long onGrid(double db, long grid) {
