@@ -80,6 +80,9 @@ public final class ParseFailure {
         if (type == long.class || type == Long.class) {
             return "a whole number up to " + Long.MAX_VALUE;
         }
+        if (type == double.class || type == Double.class) {
+            return "a number";
+        }
         return "a " + type.getSimpleName().toLowerCase(Locale.ROOT);
     }
 
