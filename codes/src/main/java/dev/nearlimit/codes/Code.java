@@ -23,9 +23,10 @@ public final class Code {
     private final BitMatrix generator;
     private final SparseBitMatrix parityCheck;
     private final int[] informationPositions;
-    private final Encoder encoder;
     private final KnownDistance knownDistance;
     private final List<Structure> structures;
+    /** Null until somebody encodes: choosing it takes longer than building some codes. */
+    private volatile Encoder encoder;
 
     private Code(
             String designator,
@@ -66,15 +67,7 @@ public final class Code {
         }
         BitMatrix generator = reduced.nullSpace();
         int[] positions = reduced.freeColumns();
-        return new Code(
-                designator,
-                source,
-                generator,
-                parityCheck,
-                positions,
-                new SystematicEncoder(generator, positions),
-                null,
-                List.of());
+        return new Code(designator, source, generator, parityCheck, positions, null, null, List.of());
     }
 
     /**
@@ -107,7 +100,7 @@ public final class Code {
                 systematic.copy(),
                 SparseBitMatrix.of(check),
                 positions.clone(),
-                new SystematicEncoder(systematic, positions),
+                null,
                 null,
                 List.of());
     }
@@ -218,8 +211,15 @@ public final class Code {
         return informationPositions.clone();
     }
 
+    /** The encoder, made when it is first asked for: by whichever matrix takes fewer operations on words. */
     public Encoder encoder() {
-        return encoder;
+        Encoder made = encoder;
+        if (made == null) {
+            // Two threads may both make one; they are equal.
+            made = SystematicEncoder.of(generator, informationPositions, parityCheck);
+            encoder = made;
+        }
+        return made;
     }
 
     /** The minimum distance where the family knows it; search belongs to the algebra room. */

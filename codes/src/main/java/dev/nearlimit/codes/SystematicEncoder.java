@@ -1,35 +1,38 @@
 package dev.nearlimit.codes;
 
+import dev.nearlimit.codes.encoding.GeneratorProgram;
+import dev.nearlimit.codes.encoding.ParityCheckProgram;
+import dev.nearlimit.codes.encoding.WordProgram;
 import dev.nearlimit.codes.gf2.BitMatrix;
+import dev.nearlimit.codes.gf2.SparseBitMatrix;
 
 /**
- * Encodes with a generator matrix that carries information bit i unchanged at position {@code informationPositions[i]}:
- * information is copied, and every other position is the sum of the information bits that its column names. Plain and
- * general; costs as many word operations a batch as the parity part has ones.
+ * Copies information bit i to position {@code informationPositions[i]} and computes the other positions by a program.
+ * Parity is a function of the information, so that every correct program gives the same codeword.
  */
 final class SystematicEncoder implements Encoder {
     private final int n;
     private final int[] informationPositions;
-    private final int[] parityPositions;
-    private final int[][] sourcesOfParity;
+    private final WordProgram parity;
 
-    SystematicEncoder(BitMatrix generator, int[] informationPositions) {
-        this.n = generator.columns();
+    private SystematicEncoder(int n, int[] informationPositions, WordProgram parity) {
+        this.n = n;
         this.informationPositions = informationPositions.clone();
-        boolean[] isInformation = new boolean[n];
-        for (int position : informationPositions) {
-            isInformation[position] = true;
-        }
-        this.parityPositions = new int[n - informationPositions.length];
-        this.sourcesOfParity = new int[parityPositions.length][];
-        BitMatrix columns = generator.transpose();
-        int next = 0;
-        for (int position = 0; position < n; position++) {
-            if (!isInformation[position]) {
-                parityPositions[next] = position;
-                sourcesOfParity[next++] = columns.onesOfRow(position);
-            }
-        }
+        this.parity = parity;
+    }
+
+    /**
+     * The encoder that reads the fewest words: by the parity-check matrix where its structure allows, else by the
+     * generator.
+     *
+     * @param generator k x n, systematic at {@code informationPositions}
+     * @param parityCheck m x n, defining the same code
+     */
+    static SystematicEncoder of(BitMatrix generator, int[] informationPositions, SparseBitMatrix parityCheck) {
+        WordProgram parity = ParityCheckProgram.cheaperThan(
+                        GeneratorProgram.wordOperations(generator), parityCheck, informationPositions)
+                .orElseGet(() -> GeneratorProgram.of(generator, informationPositions));
+        return new SystematicEncoder(generator.columns(), informationPositions, parity);
     }
 
     @Override
@@ -41,12 +44,6 @@ final class SystematicEncoder implements Encoder {
         for (int i = 0; i < informationPositions.length; i++) {
             codeword[informationPositions[i]] = information[i];
         }
-        for (int p = 0; p < parityPositions.length; p++) {
-            long sum = 0;
-            for (int source : sourcesOfParity[p]) {
-                sum ^= information[source];
-            }
-            codeword[parityPositions[p]] = sum;
-        }
+        parity.run(codeword);
     }
 }

@@ -22,6 +22,11 @@ public interface DecoderSettings {
     /** Whether the decoder looks at nothing but the signs of the LLRs. */
     boolean hardDecision();
 
+    /** Whether the decoder looks at nothing but the quantiser's levels. */
+    default boolean readsLevels() {
+        return false;
+    }
+
     /**
      * A decoder for one code.
      *

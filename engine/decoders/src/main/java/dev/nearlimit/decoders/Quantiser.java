@@ -18,6 +18,19 @@ public interface Quantiser {
         return wordBits() == 0 ? 0 : (1 << (wordBits() - 1)) - 1;
     }
 
+    /**
+     * Quantises values in place, a whole number of rows of 64 frames.
+     *
+     * @param values LLRs from {@code at} on; receives what the levels stand for
+     * @param at where they begin
+     * @param count how many, a multiple of 64
+     * @param levels receives the levels from {@code levelsAt} on; left alone where values pass unquantised
+     * @param levelsAt where the levels go
+     */
+    void apply(float[] values, int at, int count, byte[] levels, int levelsAt);
+
     /** Fills the batch's levels from its values and overwrites the values with what the levels stand for. */
-    void apply(LlrBatch batch);
+    default void apply(LlrBatch batch) {
+        apply(batch.values(), 0, batch.values().length, batch.levels(), 0);
+    }
 }

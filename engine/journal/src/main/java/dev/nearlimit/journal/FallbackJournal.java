@@ -49,6 +49,27 @@ public final class FallbackJournal implements Journal {
         });
     }
 
+    @Override
+    public Optional<Claim> claim(ContentHash job, long from, long end, int most) {
+        return withFallback(journal -> journal.claim(job, from, end, most));
+    }
+
+    @Override
+    public void release(Claim claim) {
+        withFallback(journal -> {
+            journal.release(claim);
+            return true;
+        });
+    }
+
+    @Override
+    public void flush() {
+        withFallback(journal -> {
+            journal.flush();
+            return true;
+        });
+    }
+
     /** Closes both; a failure of the first is reported if none was before. */
     @Override
     public void close() {

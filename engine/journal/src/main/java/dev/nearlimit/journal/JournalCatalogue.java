@@ -115,19 +115,18 @@ public final class JournalCatalogue implements AutoCloseable {
 
     /** Removes a job with all its pieces and gives the space back; false if there is no such job. */
     public boolean forget(ContentHash job) {
-        int[] removed = new int[1];
         try {
-            file.inTransaction(() -> {
+            int removed = file.inTransaction(() -> {
                 try (PreparedStatement statement = file.prepare("DELETE FROM jobs WHERE hash = ?")) {
                     statement.setString(1, job.hex());
-                    removed[0] = statement.executeUpdate();
+                    return statement.executeUpdate();
                 }
             });
             file.execute("PRAGMA incremental_vacuum");
+            return removed > 0;
         } catch (SQLException e) {
             throw file.failure(e);
         }
-        return removed[0] > 0;
     }
 
     /**
@@ -153,6 +152,7 @@ public final class JournalCatalogue implements AutoCloseable {
                             job.changed().getEpochSecond());
                     source.forEachPiece(job.hash(), (content, piece) -> counts[take(writer, job, content, piece)]++);
                 }
+                return null;
             });
         } catch (SQLException e) {
             throw file.failure(e);

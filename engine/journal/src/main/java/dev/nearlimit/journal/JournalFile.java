@@ -7,6 +7,8 @@ import java.sql.PreparedStatement;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.sql.Statement;
+import java.util.HashMap;
+import java.util.Map;
 import org.sqlite.SQLiteConfig;
 import org.sqlite.SQLiteErrorCode;
 import org.sqlite.SQLiteException;
@@ -20,7 +22,7 @@ import org.sqlite.SQLiteException;
  */
 final class JournalFile implements AutoCloseable {
     /** The layout that this version reads and writes, kept as user_version. */
-    static final int SCHEMA = 1;
+    static final int SCHEMA = 2;
     /** "NLMT", by which a journal is told from other SQLite files. */
     private static final int APPLICATION_ID = 0x4E4C4D54;
 
@@ -34,11 +36,19 @@ final class JournalFile implements AutoCloseable {
         "CREATE TABLE pieces (job INTEGER NOT NULL REFERENCES jobs (id) ON DELETE CASCADE, piece INTEGER NOT NULL,"
                 + " crc32c INTEGER NOT NULL, content BLOB NOT NULL, UNIQUE (job, piece)) STRICT",
         "PRAGMA application_id = " + APPLICATION_ID,
+    };
+    /** What layout 2 has beside layout 1. */
+    private static final String[] SINCE_2 = {
+        "CREATE TABLE claims (id INTEGER PRIMARY KEY, job TEXT NOT NULL, first_piece INTEGER NOT NULL,"
+                + " end_piece INTEGER NOT NULL, owner TEXT NOT NULL, process_id INTEGER NOT NULL,"
+                + " processes TEXT NOT NULL, renewed_epoch_ms INTEGER NOT NULL) STRICT",
+        "CREATE INDEX claims_of_job ON claims (job, first_piece)",
         "PRAGMA user_version = " + SCHEMA,
     };
 
     private final String name;
     private final Connection connection;
+    private final Map<String, PreparedStatement> statements = new HashMap<>();
 
     private JournalFile(String name, Connection connection) {
         this.name = name;
@@ -108,10 +118,12 @@ final class JournalFile implements AutoCloseable {
         execute("PRAGMA auto_vacuum = INCREMENTAL");
         switchToWriteAheadLog();
         execute("BEGIN IMMEDIATE");
-        if (recognise() == 0) {
-            for (String statement : LAYOUT) {
-                execute(statement);
-            }
+        int schema = recognise();
+        if (schema < 1) {
+            executeAll(LAYOUT);
+        }
+        if (schema < 2) {
+            executeAll(SINCE_2);
         }
         execute("COMMIT");
     }
@@ -164,8 +176,19 @@ final class JournalFile implements AutoCloseable {
         return name;
     }
 
+    /** A statement for the caller to close. */
     PreparedStatement prepare(String sql) throws SQLException {
         return connection.prepareStatement(sql);
+    }
+
+    /** A statement that is kept for the next time; its results must be closed before it is used again. */
+    PreparedStatement statement(String sql) throws SQLException {
+        PreparedStatement statement = statements.get(sql);
+        if (statement == null) {
+            statement = connection.prepareStatement(sql);
+            statements.put(sql, statement);
+        }
+        return statement;
     }
 
     /** Runs a statement without parameters and result. */
@@ -173,6 +196,12 @@ final class JournalFile implements AutoCloseable {
         try (Statement statement = connection.createStatement()) {
             // As an update, for only that runs a statement to its end: giving space back takes a step a page.
             statement.executeUpdate(sql);
+        }
+    }
+
+    private void executeAll(String... statements) throws SQLException {
+        for (String statement : statements) {
+            execute(statement);
         }
     }
 
@@ -185,16 +214,17 @@ final class JournalFile implements AutoCloseable {
 
     /** Work that is done whole or not at all. */
     @FunctionalInterface
-    interface Work {
-        void run() throws SQLException;
+    interface Work<T> {
+        T run() throws SQLException;
     }
 
     /** Does work in one transaction, waiting for other writers first. */
-    void inTransaction(Work work) throws SQLException {
+    <T> T inTransaction(Work<T> work) throws SQLException {
         execute("BEGIN IMMEDIATE");
         try {
-            work.run();
+            T result = work.run();
             execute("COMMIT");
+            return result;
         } catch (SQLException | RuntimeException e) {
             rollBack(e);
             throw e;
@@ -211,6 +241,8 @@ final class JournalFile implements AutoCloseable {
     }
 
     JournalException failure(SQLException e) {
+        // The driver closes a statement that failed without saying so.
+        statements.clear();
         return failure(name, e);
     }
 

@@ -25,28 +25,26 @@ final class PieceWriter {
         // SQLite writes the JSON, which gets its escapes right.
         String pairs = "?, ?, ".repeat(description.facts().size());
         String json = "json_object(" + (pairs.isEmpty() ? "" : pairs.substring(0, pairs.length() - 2)) + ")";
-        try (PreparedStatement statement = file.prepare(String.format(JOB, json))) {
-            int at = 1;
-            statement.setString(at++, hash.hex());
-            for (Map.Entry<String, String> fact : description.facts().entrySet()) {
-                statement.setString(at++, fact.getKey());
-                statement.setString(at++, fact.getValue());
-            }
-            statement.setString(at++, tool);
-            statement.setLong(at++, createdEpochS);
-            statement.setLong(at, changedEpochS);
-            statement.executeUpdate();
+        PreparedStatement statement = file.statement(String.format(JOB, json));
+        int at = 1;
+        statement.setString(at++, hash.hex());
+        for (Map.Entry<String, String> fact : description.facts().entrySet()) {
+            statement.setString(at++, fact.getKey());
+            statement.setString(at++, fact.getValue());
         }
+        statement.setString(at++, tool);
+        statement.setLong(at++, createdEpochS);
+        statement.setLong(at, changedEpochS);
+        statement.executeUpdate();
     }
 
     /** Adds a piece of a job that is there; false if it had the piece. */
     boolean piece(ContentHash hash, long piece, byte[] content) throws SQLException {
-        try (PreparedStatement statement = file.prepare(PIECE)) {
-            statement.setString(1, hash.hex());
-            statement.setLong(2, piece);
-            statement.setLong(3, Checksum.of(content));
-            statement.setBytes(4, content);
-            return statement.executeUpdate() > 0;
-        }
+        PreparedStatement statement = file.statement(PIECE);
+        statement.setString(1, hash.hex());
+        statement.setLong(2, piece);
+        statement.setLong(3, Checksum.of(content));
+        statement.setBytes(4, content);
+        return statement.executeUpdate() > 0;
     }
 }

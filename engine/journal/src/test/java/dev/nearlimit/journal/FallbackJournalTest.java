@@ -52,6 +52,18 @@ final class FallbackJournalTest {
         assertEquals(Optional.empty(), second.find(JOB, 1));
     }
 
+    /** A claim of the first journal means nothing to the second, which gives whatever it is asked for. */
+    @Test
+    void claimsAndReleasesSurviveTheChange() {
+        FallbackJournal journal = new FallbackJournal(new Filling(0), new MemoryJournal(), e -> {});
+        Claim claim = journal.claim(JOB, 0, 100, 10).orElseThrow();
+        journal.keep(JOB, 0, new byte[] {1});
+        assertTrue(journal.failed());
+        journal.release(claim);
+        journal.flush();
+        assertEquals(Optional.of(new Claim(JOB, 0, 10)), journal.claim(JOB, 0, 100, 10));
+    }
+
     @Test
     void aSoundJournalIsUsedAlone() {
         Journal second = new MemoryJournal();

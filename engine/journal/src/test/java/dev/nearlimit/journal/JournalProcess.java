@@ -2,7 +2,10 @@ package dev.nearlimit.journal;
 
 import java.nio.file.Path;
 
-/** A process that keeps pieces one after the other until it is killed or done, and says of each that it is kept. */
+/**
+ * A process that claims pieces, keeps them one after the other until it is killed or done, and says of every ten that
+ * they are in the file.
+ */
 final class JournalProcess {
     private JournalProcess() {}
 
@@ -10,11 +13,15 @@ final class JournalProcess {
         long first = Long.parseLong(args[1]);
         long end = Long.parseLong(args[2]);
         try (SqliteJournal journal = SqliteJournal.open(Path.of(args[0]), "tool 1")) {
+            journal.claim(JournalContract.OTHER, 0, 1000, 1000);
             for (long piece = first; piece < end; piece++) {
                 if (journal.find(JournalContract.JOB, piece).isEmpty()) {
                     journal.keep(JournalContract.JOB, piece, JournalContract.content(piece));
                 }
-                System.out.println(piece);
+                if (piece % 10 == 9) {
+                    journal.flush();
+                    System.out.println(piece);
+                }
             }
         }
     }

@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -23,7 +24,7 @@ final class JournalProcessesTest {
         for (int round = 0; round < 3; round++) {
             Process process = JournalProcess.start(folder, 0, Long.MAX_VALUE);
             try (BufferedReader said = process.inputReader()) {
-                long until = kept + 150;
+                long until = kept + 150; // a multiple of ten, as what the process says
                 for (String line = said.readLine(); line != null; line = said.readLine()) {
                     kept = Math.max(kept, Long.parseLong(line) + 1);
                     if (kept == until) {
@@ -34,6 +35,9 @@ final class JournalProcessesTest {
             }
             assertTrue(process.waitFor() != 0, "was not killed");
             try (SqliteJournal journal = SqliteJournal.open(folder.resolve("journal.sqlite"), "tool 1")) {
+                // What the dead process had claimed stands in nobody's way.
+                Claim claim = new Claim(JournalContract.OTHER, 0, 1000);
+                assertEquals(Optional.of(claim), journal.claim(JournalContract.OTHER, 0, 1000, 1000));
                 for (long piece = 0; piece < kept; piece++) {
                     assertArrayEquals(
                             JournalContract.content(piece),

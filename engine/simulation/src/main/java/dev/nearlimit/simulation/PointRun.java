@@ -9,10 +9,19 @@ import java.util.Map;
 import java.util.Optional;
 
 /**
- * One run of one point, shared by its threads: hands out block numbers in order, takes finished blocks in any order and
- * counts them in theirs. A block that was begun is finished and kept even when the rule is met meanwhile.
+ * One run of one point, shared by its threads: hands out numbers of blocks that the journal gives it to compute, takes
+ * finished blocks in any order and counts them in theirs, with those that other runs of the same point have put into the
+ * journal meanwhile. A block that was begun is finished and kept even when the rule is met meanwhile.
  */
 final class PointRun {
+    /** How far blocks may be computed ahead of one that is missing; keeps memory flat where somebody else holds it. */
+    private static final long MOST_BLOCKS_AHEAD = 1024;
+
+    /** How often the journal is asked for a block that somebody else has under way [ms]. */
+    private static final long POLL_MS = 50;
+
+    private static final long NONE = -1;
+
     private final SchemeBench bench;
     private final PointStreams streams;
     private final Journal journal;
@@ -23,8 +32,8 @@ final class PointRun {
 
     private final PrefixCounter counter;
     private final Map<Long, Block> waiting = new HashMap<>();
-    private long nextToHandOut;
     private long nextToCount;
+    private BlockLease lease;
     private Throwable failure;
     private boolean ended;
 
@@ -50,21 +59,23 @@ final class PointRun {
      * Counts the blocks that the journal has from the first one on. Called before any thread works, so that a point that
      * needs nothing more makes no thread run ahead.
      */
-    void countKept() {
-        for (long block = handOut(); block >= 0; block = handOut()) {
-            Optional<byte[]> kept = journal.find(job, block);
-            if (kept.isEmpty()) {
-                handBack();
-                return;
-            }
-            tally.found(job, block);
-            count(block, Block.fromBytes(kept.get()));
+    synchronized void countKept() {
+        boolean found = true;
+        while (found && !counter.met() && !control.stopRequested()) {
+            found = countKept(nextToCount);
         }
+        lease = new BlockLease(journal, job, nextToCount, blocksAtMost);
     }
 
-    /** Takes back the number handed out last. */
-    private synchronized void handBack() {
-        nextToHandOut--;
+    /** Counts a block if the journal has it. */
+    private boolean countKept(long block) {
+        Optional<byte[]> kept = journal.find(job, block);
+        if (kept.isEmpty()) {
+            return false;
+        }
+        tally.found(job, block);
+        count(block, Block.fromBytes(kept.get()));
+        return true;
     }
 
     /** Whether nothing is left to do. */
@@ -76,14 +87,9 @@ final class PointRun {
     void work() {
         try {
             FrameWorker worker = bench.take();
-            PointWorker chain = new PointWorker(worker);
-            for (long block = handOut(); block >= 0; block = handOut()) {
-                Optional<Block> result = chain.findOrCompute(block);
-                if (result.isEmpty()) {
-                    end();
-                } else {
-                    count(block, result.get());
-                }
+            Feed feed = new Feed(streams.newPayload(), streams.newLink());
+            while (feed.await()) {
+                worker.run(feed, feed.payload, feed.link, control);
             }
             bench.giveBack(worker);
         } catch (RuntimeException | Error e) {
@@ -91,36 +97,92 @@ final class PointRun {
         }
     }
 
-    /** A worker with this point's payload and link. */
-    private final class PointWorker {
-        private final FrameWorker worker;
-        private final Payload payload = streams.newPayload();
-        private final Link link = streams.newLink();
+    /** What one worker gets its blocks from and delivers them to, with its payload and link. */
+    private final class Feed implements FrameWorker.BlockFeed {
+        private final Payload payload;
+        private final Link link;
+        private long awaited = NONE;
 
-        PointWorker(FrameWorker worker) {
-            this.worker = worker;
+        Feed(Payload payload, Link link) {
+            this.payload = payload;
+            this.link = link;
         }
 
-        Optional<Block> findOrCompute(long number) {
-            Optional<byte[]> kept = journal.find(job, number);
-            if (kept.isPresent()) {
-                tally.found(job, number);
-                return Optional.of(Block.fromBytes(kept.get()));
+        /** Waits for a block to compute; false when there will be none. */
+        boolean await() {
+            awaited = nextToCompute(true);
+            return awaited != NONE;
+        }
+
+        @Override
+        public long next() {
+            if (awaited == NONE) {
+                return nextToCompute(false);
             }
-            Optional<Block> block = worker.compute(number, payload, link, control);
-            if (block.isPresent()) {
-                journal.keep(job, number, block.get().toBytes());
-                tally.computed(job, number, bench.framesPerBlock());
+            long block = awaited;
+            awaited = NONE;
+            return block;
+        }
+
+        private long nextToCompute(boolean mayWait) {
+            long block = handOut(mayWait);
+            while (block != NONE && countKept(block)) {
+                block = handOut(mayWait);
             }
             return block;
         }
+
+        @Override
+        public void done(long number, Block block) {
+            journal.keep(job, number, block.toBytes());
+            tally.computed(job, number, bench.framesPerBlock());
+            count(number, block);
+        }
     }
 
-    private synchronized long handOut() {
-        if (ended || counter.met() || nextToHandOut >= blocksAtMost || control.stopRequested()) {
-            return -1;
+    /**
+     * The next block to compute. Where nothing is left but what other runs of this point have under way, waits for them;
+     * but a worker that has frames of its own under way must not, since those runs may be waiting for these.
+     */
+    private synchronized long handOut(boolean mayWait) {
+        while (!ended && !control.stopRequested()) {
+            while (lease.awaits(nextToCount) && !counter.met() && countAwaited()) {
+                // Each round counts one block more.
+            }
+            if (counter.met() || lease.usedUp()) {
+                break;
+            }
+            long limit = nextToCount + MOST_BLOCKS_AHEAD;
+            long block = lease.next(limit);
+            if (block != NONE) {
+                return block;
+            }
+            if (!lease.extend(nextToCount, limit)) {
+                if (!mayWait) {
+                    break;
+                }
+                pause();
+            }
         }
-        return nextToHandOut++;
+        return NONE;
+    }
+
+    private boolean countAwaited() {
+        long block = nextToCount;
+        boolean found = countKept(block);
+        if (found) {
+            lease.arrived(block);
+        }
+        return found;
+    }
+
+    private void pause() {
+        try {
+            wait(POLL_MS);
+        } catch (InterruptedException e) {
+            // Asked next whether to stop, the run finds its thread interrupted.
+            Thread.currentThread().interrupt();
+        }
     }
 
     private synchronized void count(long number, Block block) {
@@ -134,6 +196,7 @@ final class PointRun {
             }
         }
         if (counted) {
+            notifyAll();
             PointCounts counts = counter.counts();
             control.progress().counted(counts.frames(), counts.frameErrors());
         }
@@ -141,6 +204,16 @@ final class PointRun {
 
     synchronized void end() {
         ended = true;
+    }
+
+    /** Called once all threads have stopped working: gives back what was not computed and has the journal write. */
+    synchronized void close() {
+        try {
+            lease.release();
+            journal.flush();
+        } catch (RuntimeException e) {
+            fail(e);
+        }
     }
 
     private synchronized void fail(Throwable thrown) {

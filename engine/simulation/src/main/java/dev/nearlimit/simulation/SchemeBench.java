@@ -17,8 +17,8 @@ import java.util.ArrayDeque;
  * than a run, and the part of the journal key that the scheme fixes.
  */
 final class SchemeBench {
-    /** Operations that a block should take: some 20 ms at a nanosecond each. */
-    private static final double OPERATIONS_PER_BLOCK = 2e7;
+    /** Operations that a block should take: a few milliseconds in lanes, some tens where a decoder goes frame by frame. */
+    private static final double OPERATIONS_PER_BLOCK = 1e8;
     /** Making and demapping a received value, and starting a frame's streams, in the same unit. */
     private static final double OPERATIONS_PER_BIT = 16;
 

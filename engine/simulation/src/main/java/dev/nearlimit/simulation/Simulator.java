@@ -106,6 +106,7 @@ public final class Simulator {
         }
         run.work();
         await(started, run);
+        run.close();
         return run.outcome();
     }
 

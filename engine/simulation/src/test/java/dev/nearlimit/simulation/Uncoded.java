@@ -6,7 +6,6 @@ import dev.nearlimit.decoders.Decoder;
 import dev.nearlimit.decoders.DecoderSettings;
 import dev.nearlimit.decoders.OperationCount;
 import dev.nearlimit.decoders.Quantiser;
-import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.limits.Modulation;
 
 /**
@@ -76,7 +75,7 @@ record Uncoded(boolean talkative) implements DecoderSettings {
         }
 
         @Override
-        public void apply(LlrBatch batch) {
+        public void apply(float[] values, int at, int count, byte[] levels, int levelsAt) {
             // Values pass as they are, and levels are not used.
         }
     }

@@ -31,4 +31,16 @@ public final class DecodedBatch {
     public void setDeclaredFailures(long lanes) {
         this.declaredFailures = lanes;
     }
+
+    /** Takes over what another batch of the same n says of some lanes. */
+    public void take(long lanes, DecodedBatch from) {
+        for (int i = 0; i < bits.length; i++) {
+            bits[i] = (bits[i] & ~lanes) | (from.bits[i] & lanes);
+        }
+        for (long rest = lanes; rest != 0; rest &= rest - 1) {
+            int lane = Long.numberOfTrailingZeros(rest);
+            iterations[lane] = from.iterations[lane];
+        }
+        declaredFailures = (declaredFailures & ~lanes) | (from.declaredFailures & lanes);
+    }
 }

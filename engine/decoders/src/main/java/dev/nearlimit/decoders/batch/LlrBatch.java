@@ -13,12 +13,21 @@ public final class LlrBatch {
 
     /** A batch for codewords of n bits, all zero. */
     public LlrBatch(int n) {
+        this(n, true);
+    }
+
+    private LlrBatch(int n, boolean withValues) {
         if (n < 1) {
             throw new IllegalArgumentException("n is " + n + ", must be at least 1");
         }
         this.n = n;
-        this.values = new float[Math.multiplyExact(n, FrameBatch.FRAMES)];
-        this.levels = new byte[values.length];
+        this.levels = new byte[Math.multiplyExact(n, FrameBatch.FRAMES)];
+        this.values = new float[withValues ? levels.length : 0];
+    }
+
+    /** A batch without values, a fifth of the memory, for decoders that read nothing but levels. */
+    public static LlrBatch ofLevels(int n) {
+        return new LlrBatch(n, false);
     }
 
     /** Codeword length in bits. */
@@ -28,7 +37,7 @@ public final class LlrBatch {
 
     /**
      * The n*64 LLRs in nats, the live array. Behind a quantiser these are the values that its levels stand for, so that
-     * a floating-point decoder sees what a quantised receiver would hand it.
+     * a floating-point decoder sees what a quantised receiver would hand it. Empty in a batch of levels alone.
      */
     public float[] values() {
         return values;

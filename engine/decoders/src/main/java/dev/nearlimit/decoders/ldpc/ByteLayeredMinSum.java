@@ -28,6 +28,10 @@ final class ByteLayeredMinSum extends BeliefPropagation {
     private final byte[] posterior;
     private final byte[] message;
     private final byte[] scratch;
+    private final ChosenLanes starting = new ChosenLanes();
+    private final byte[] row = new byte[FrameBatch.FRAMES];
+    private final byte[] keep;
+    private long started;
 
     ByteLayeredMinSum(
             SparseBitMatrix matrix, Iterations iterations, MinSumArithmetic arithmetic, LayeredMinSumKernels kernels) {
@@ -44,27 +48,52 @@ final class ByteLayeredMinSum extends BeliefPropagation {
         }
         this.message = new byte[messages];
         this.scratch = new byte[most];
+        this.keep = new byte[RowRuns.MOST_ROWS * FrameBatch.FRAMES];
     }
 
     @Override
-    void load(LlrBatch received) {
-        System.arraycopy(received.levels(), 0, posterior, 0, posterior.length);
-        Arrays.fill(message, (byte) 0);
+    void load(LlrBatch received, long lanes) {
+        starting.choose(lanes);
+        starting.keepOthers(row);
+        kernels.start(posterior, received.levels(), row);
+        // Their messages are taken for 0 by the next iteration, which writes them anyway.
+        started |= lanes;
     }
 
     @Override
     void iterate() {
+        if (started == 0) {
+            for (CheckRun run : runs) {
+                kernels.update(run, arithmetic, posterior, message, scratch);
+            }
+            return;
+        }
+        starting.choose(started);
+        starting.keepOthers(keep);
+        started = 0;
         for (CheckRun run : runs) {
-            kernels.update(run, arithmetic, posterior, message, scratch);
+            kernels.updateStarting(run, arithmetic, posterior, message, scratch, keep);
         }
     }
 
     @Override
+    long unsatisfied(long inQuestion) {
+        Arrays.fill(row, (byte) 0);
+        for (CheckRun run : runs) {
+            kernels.addUnsatisfied(run, posterior, row);
+        }
+        return signs(row, 0) & inQuestion;
+    }
+
+    @Override
     long hardDecisions(int position) {
-        int at = position * FrameBatch.FRAMES;
+        return signs(posterior, position * FrameBatch.FRAMES);
+    }
+
+    private static long signs(byte[] values, int at) {
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f += Byte.SIZE) {
-            long signs = (long) EIGHT_BYTES.get(posterior, at + f) & SIGNS;
+            long signs = (long) EIGHT_BYTES.get(values, at + f) & SIGNS;
             word |= (((signs >>> 7) * GATHER) >>> 56) << f;
         }
         return word;

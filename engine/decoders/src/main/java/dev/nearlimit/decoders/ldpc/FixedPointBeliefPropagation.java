@@ -3,7 +3,6 @@ package dev.nearlimit.decoders.ldpc;
 import dev.nearlimit.codes.batch.FrameBatch;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
 import dev.nearlimit.decoders.batch.LlrBatch;
-import java.util.Arrays;
 
 /**
  * Min-sum on integers of stated word lengths (M and P the largest message and posterior). A check reads from each of its
@@ -20,6 +19,7 @@ import java.util.Arrays;
  * it does not of narrower ones; the results are those of any lanes that are wide enough.
  */
 final class FixedPointBeliefPropagation extends BeliefPropagation {
+    private final ChosenLanes starting = new ChosenLanes();
     private final RowRuns runs;
     private final boolean layered;
     private final FixedPointCheckRule rule;
@@ -53,14 +53,12 @@ final class FixedPointBeliefPropagation extends BeliefPropagation {
     }
 
     @Override
-    void load(LlrBatch received) {
-        byte[] levels = received.levels();
-        for (int i = 0; i < posterior.length; i++) {
-            posterior[i] = levels[i];
-        }
-        System.arraycopy(posterior, 0, channel, 0, channel.length);
+    void load(LlrBatch received, long lanes) {
+        starting.choose(lanes);
+        starting.copy(received.levels(), posterior);
+        starting.copy(received.levels(), channel);
         for (int[] ofEdge : message) {
-            Arrays.fill(ofEdge, 0);
+            starting.clear(ofEdge);
         }
     }
 

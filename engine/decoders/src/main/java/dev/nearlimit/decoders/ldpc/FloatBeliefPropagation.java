@@ -3,7 +3,6 @@ package dev.nearlimit.decoders.ldpc;
 import dev.nearlimit.codes.batch.FrameBatch;
 import dev.nearlimit.codes.gf2.SparseBitMatrix;
 import dev.nearlimit.decoders.batch.LlrBatch;
-import java.util.Arrays;
 
 /**
  * Belief propagation in single precision with any check rule. A check reads from each of its bits t = posterior - its own
@@ -23,6 +22,7 @@ final class FloatBeliefPropagation extends BeliefPropagation {
     /** Largest magnitude of a channel LLR and of a message. */
     static final float LARGEST = 1024f;
 
+    private final ChosenLanes starting = new ChosenLanes();
     private final RowRuns runs;
     private final boolean layered;
     private final FloatCheckRule rule;
@@ -51,15 +51,12 @@ final class FloatBeliefPropagation extends BeliefPropagation {
     }
 
     @Override
-    void load(LlrBatch received) {
-        float[] values = received.values();
-        for (int i = 0; i < posterior.length; i++) {
-            // Adding +0 turns -0 into +0.
-            posterior[i] = Math.max(-LARGEST, Math.min(LARGEST, values[i])) + 0f;
-        }
-        System.arraycopy(posterior, 0, channel, 0, channel.length);
+    void load(LlrBatch received, long lanes) {
+        starting.choose(lanes);
+        starting.copyLimited(received.values(), LARGEST, posterior);
+        starting.copyLimited(received.values(), LARGEST, channel);
         for (float[] ofEdge : message) {
-            Arrays.fill(ofEdge, 0f);
+            starting.clear(ofEdge);
         }
     }
 

@@ -55,6 +55,11 @@ public record MinSumSettings(Iterations iterations, MagnitudeCorrection correcti
     }
 
     @Override
+    public boolean readsLevels() {
+        return words.isPresent();
+    }
+
+    @Override
     public Decoder newDecoder(Code code, Quantiser quantiser) {
         SparseBitMatrix matrix = code.parityCheck();
         if (words.isEmpty()) {

@@ -19,6 +19,10 @@ final class ShortLayeredMinSum extends BeliefPropagation {
     private final short[] posterior;
     private final short[] message;
     private final short[] scratch;
+    private final ChosenLanes starting = new ChosenLanes();
+    private final short[] row = new short[FrameBatch.FRAMES];
+    private final short[] keep;
+    private long started;
 
     ShortLayeredMinSum(
             SparseBitMatrix matrix, Iterations iterations, MinSumArithmetic arithmetic, LayeredMinSumKernels kernels) {
@@ -35,30 +39,51 @@ final class ShortLayeredMinSum extends BeliefPropagation {
         }
         this.message = new short[messages];
         this.scratch = new short[most];
+        this.keep = new short[RowRuns.MOST_ROWS * FrameBatch.FRAMES];
     }
 
     @Override
-    void load(LlrBatch received) {
-        byte[] levels = received.levels();
-        for (int i = 0; i < posterior.length; i++) {
-            posterior[i] = levels[i];
-        }
-        Arrays.fill(message, (short) 0);
+    void load(LlrBatch received, long lanes) {
+        starting.choose(lanes);
+        starting.copy(received.levels(), posterior);
+        // Their messages are taken for 0 by the next iteration, which writes them anyway.
+        started |= lanes;
     }
 
     @Override
     void iterate() {
+        if (started == 0) {
+            for (CheckRun run : runs) {
+                kernels.update(run, arithmetic, posterior, message, scratch);
+            }
+            return;
+        }
+        starting.choose(started);
+        starting.keepOthers(keep);
+        started = 0;
         for (CheckRun run : runs) {
-            kernels.update(run, arithmetic, posterior, message, scratch);
+            kernels.updateStarting(run, arithmetic, posterior, message, scratch, keep);
         }
     }
 
     @Override
+    long unsatisfied(long inQuestion) {
+        Arrays.fill(row, (short) 0);
+        for (CheckRun run : runs) {
+            kernels.addUnsatisfied(run, posterior, row);
+        }
+        return signs(row, 0) & inQuestion;
+    }
+
+    @Override
     long hardDecisions(int position) {
-        int at = position * FrameBatch.FRAMES;
+        return signs(posterior, position * FrameBatch.FRAMES);
+    }
+
+    private static long signs(short[] values, int at) {
         long word = 0;
         for (int f = 0; f < FrameBatch.FRAMES; f++) {
-            word |= (posterior[at + f] >>> 31 & 1L) << f;
+            word |= (values[at + f] >>> 31 & 1L) << f;
         }
         return word;
     }

@@ -1,7 +1,6 @@
 package dev.nearlimit.decoders.quantiser;
 
 import dev.nearlimit.decoders.Quantiser;
-import dev.nearlimit.decoders.batch.LlrBatch;
 
 /** Values pass in single precision; levels are left alone. */
 public record NoQuantiser() implements Quantiser {
@@ -16,7 +15,7 @@ public record NoQuantiser() implements Quantiser {
     }
 
     @Override
-    public void apply(LlrBatch batch) {
+    public void apply(float[] values, int at, int count, byte[] levels, int levelsAt) {
         // Nothing to do: the decoder sees the LLRs as they are.
     }
 }

@@ -2,8 +2,8 @@ package dev.nearlimit.decoders.quantiser;
 
 import dev.nearlimit.decoders.InvalidDecoderException;
 import dev.nearlimit.decoders.Quantiser;
-import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.decoders.setting.SettingReader;
+import dev.nearlimit.numerics.kernels.Kernels;
 
 /**
  * A uniform quantiser of b bits, rounding half away from zero. All operations are in single precision, each exactly
@@ -69,27 +69,12 @@ public record UniformQuantiser(int wordBits, float step, Rise rise) implements Q
     }
 
     @Override
-    public void apply(LlrBatch batch) {
-        float[] values = batch.values();
-        byte[] levels = batch.levels();
-        float rail = (1 << (wordBits - 1)) - 1;
+    public void apply(float[] values, int at, int count, byte[] levels, int levelsAt) {
+        int rail = (1 << (wordBits - 1)) - 1;
         if (rise == Rise.MID_TREAD) {
-            for (int i = 0; i < values.length; i++) {
-                float y = Math.min(Math.abs(values[i] / step), rail);
-                int whole = (int) y;
-                int magnitude = y - whole >= 0.5f ? whole + 1 : whole;
-                int level = values[i] < 0f ? -magnitude : magnitude;
-                levels[i] = (byte) level;
-                values[i] = level * step;
-            }
+            Kernels.reception().midTread(values, at, count, step, rail, levels, levelsAt);
         } else {
-            float halfStep = step * 0.5f;
-            for (int i = 0; i < values.length; i++) {
-                int magnitude = 2 * (int) Math.min(Math.abs(values[i] / step), rail) + 1;
-                int level = values[i] < 0f ? -magnitude : magnitude;
-                levels[i] = (byte) level;
-                values[i] = level * halfStep;
-            }
+            Kernels.reception().midRise(values, at, count, step, rail, levels, levelsAt);
         }
     }
 }

@@ -20,24 +20,87 @@ import jdk.incubator.vector.VectorSpecies;
  */
 final class ByteMinSum {
     private static final VectorSpecies<Byte> LANES = ByteVector.SPECIES_PREFERRED;
+    private static final int FRAMES = 64;
 
     private ByteMinSum() {}
 
     static void update(CheckRun run, MinSumArithmetic arithmetic, byte[] posterior, byte[] message, byte[] scratch) {
         int lanes = run.lanes();
         int[] bits = run.bits();
-        int minima = bits.length * lanes;
-        read(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestMessage());
-        correct(scratch, minima, lanes, arithmetic.eighths(), (byte) arithmetic.offset());
-        send(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestPosterior());
+        byte largest = (byte) arithmetic.largestMessage();
+        if (lanes % (2 * LANES.length()) == 0) {
+            read(bits, lanes, posterior, message, run.messages(), scratch, largest);
+            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (byte) arithmetic.offset());
+            send(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestPosterior());
+        } else {
+            readSingly(bits, lanes, posterior, message, run.messages(), scratch, largest);
+            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (byte) arithmetic.offset());
+            sendSingly(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestPosterior());
+        }
+    }
+
+    static void updateStarting(
+            CheckRun run, MinSumArithmetic arithmetic, byte[] posterior, byte[] message, byte[] scratch, byte[] keep) {
+        int lanes = run.lanes();
+        int[] bits = run.bits();
+        dropStarting(bits.length, lanes, message, run.messages(), keep);
+        update(run, arithmetic, posterior, message, scratch);
+    }
+
+    private static void dropStarting(int edges, int lanes, byte[] message, int messages, byte[] keep) {
+        for (int l = 0; l < lanes; l += LANES.length()) {
+            ByteVector kept = ByteVector.fromArray(LANES, keep, l);
+            for (int i = 0; i < edges; i++) {
+                int at = messages + i * lanes + l;
+                ByteVector.fromArray(LANES, message, at).lanewise(AND, kept).intoArray(message, at);
+            }
+        }
     }
 
     /** Leaves t of every edge, then a row each of the least magnitude, the second, and the product of the signs. */
     private static void read(
             int[] bits, int lanes, byte[] posterior, byte[] message, int messages, byte[] scratch, byte largest) {
         int minima = bits.length * lanes;
-        for (int l = 0; l < lanes; l += LANES.length()) {
+        for (int l = 0; l < lanes; l += 2 * LANES.length()) {
+            int k = l + LANES.length();
             // Starting both minima at the largest message limits every magnitude to it at no cost.
+            ByteVector least = ByteVector.broadcast(LANES, largest);
+            ByteVector second = least;
+            ByteVector sign = ByteVector.zero(LANES);
+            ByteVector leastOfNext = least;
+            ByteVector secondOfNext = least;
+            ByteVector signOfNext = sign;
+            for (int i = 0; i < bits.length; i++) {
+                int edge = messages + i * lanes;
+                ByteVector t = ByteVector.fromArray(LANES, posterior, bits[i] + l)
+                        .sub(ByteVector.fromArray(LANES, message, edge + l));
+                ByteVector u = ByteVector.fromArray(LANES, posterior, bits[i] + k)
+                        .sub(ByteVector.fromArray(LANES, message, edge + k));
+                t.intoArray(scratch, i * lanes + l);
+                u.intoArray(scratch, i * lanes + k);
+                sign = sign.lanewise(XOR, t);
+                signOfNext = signOfNext.lanewise(XOR, u);
+                t = t.lanewise(ABS);
+                u = u.lanewise(ABS);
+                second = second.min(least.max(t));
+                secondOfNext = secondOfNext.min(leastOfNext.max(u));
+                least = least.min(t);
+                leastOfNext = leastOfNext.min(u);
+            }
+            least.intoArray(scratch, minima + l);
+            leastOfNext.intoArray(scratch, minima + k);
+            second.intoArray(scratch, minima + lanes + l);
+            secondOfNext.intoArray(scratch, minima + lanes + k);
+            sign.intoArray(scratch, minima + 2 * lanes + l);
+            signOfNext.intoArray(scratch, minima + 2 * lanes + k);
+        }
+    }
+
+    /** {@link #read} one vector at a time, for registers so wide that a check has an odd number of them. */
+    private static void readSingly(
+            int[] bits, int lanes, byte[] posterior, byte[] message, int messages, byte[] scratch, byte largest) {
+        int minima = bits.length * lanes;
+        for (int l = 0; l < lanes; l += LANES.length()) {
             ByteVector least = ByteVector.broadcast(LANES, largest);
             ByteVector second = least;
             ByteVector sign = ByteVector.zero(LANES);
@@ -57,8 +120,8 @@ final class ByteMinSum {
     }
 
     /**
-     * Corrects what is sent: the second magnitude in its place, the least in a fourth row, since edges are told apart by
-     * the least as it was.
+     * Corrects what is sent and gives it the product of all signs: the second magnitude in its place, the least in the
+     * third row, since edges are told apart by the least as it was.
      */
     private static void correct(byte[] scratch, int minima, int lanes, int eighths, byte offset) {
         for (int l = minima; l < minima + lanes; l += LANES.length()) {
@@ -68,8 +131,11 @@ final class ByteMinSum {
                 least = scaled(least, (short) eighths);
                 second = scaled(second, (short) eighths);
             }
-            second.sub(offset).max((byte) 0).intoArray(scratch, l + lanes);
-            least.sub(offset).max((byte) 0).intoArray(scratch, l + 3 * lanes);
+            least = least.sub(offset).max((byte) 0);
+            second = second.sub(offset).max((byte) 0);
+            var negative = ByteVector.fromArray(LANES, scratch, l + 2 * lanes).compare(LT, (byte) 0);
+            second.blend(second.neg(), negative).intoArray(scratch, l + lanes);
+            least.blend(least.neg(), negative).intoArray(scratch, l + 2 * lanes);
         }
     }
 
@@ -84,18 +150,69 @@ final class ByteMinSum {
     private static void send(
             int[] bits, int lanes, byte[] posterior, byte[] message, int messages, byte[] scratch, byte limit) {
         int minima = bits.length * lanes;
+        for (int l = 0; l < lanes; l += 2 * LANES.length()) {
+            int k = l + LANES.length();
+            ByteVector least = ByteVector.fromArray(LANES, scratch, minima + l);
+            ByteVector leastOfNext = ByteVector.fromArray(LANES, scratch, minima + k);
+            ByteVector second = ByteVector.fromArray(LANES, scratch, minima + lanes + l);
+            ByteVector secondOfNext = ByteVector.fromArray(LANES, scratch, minima + lanes + k);
+            ByteVector first = ByteVector.fromArray(LANES, scratch, minima + 2 * lanes + l);
+            ByteVector firstOfNext = ByteVector.fromArray(LANES, scratch, minima + 2 * lanes + k);
+            for (int i = 0; i < bits.length; i++) {
+                int edge = messages + i * lanes;
+                ByteVector t = ByteVector.fromArray(LANES, scratch, i * lanes + l);
+                ByteVector u = ByteVector.fromArray(LANES, scratch, i * lanes + k);
+                // Where two edges share the least magnitude both choices are equal.
+                ByteVector m = second.blend(first, t.lanewise(ABS).compare(GT, least));
+                ByteVector n = secondOfNext.blend(firstOfNext, u.lanewise(ABS).compare(GT, leastOfNext));
+                m = m.blend(m.neg(), t.compare(LT, (byte) 0));
+                n = n.blend(n.neg(), u.compare(LT, (byte) 0));
+                m.intoArray(message, edge + l);
+                n.intoArray(message, edge + k);
+                t.add(m).min(limit).max((byte) -limit).intoArray(posterior, bits[i] + l);
+                u.add(n).min(limit).max((byte) -limit).intoArray(posterior, bits[i] + k);
+            }
+        }
+    }
+
+    /** {@link #send} one vector at a time. */
+    private static void sendSingly(
+            int[] bits, int lanes, byte[] posterior, byte[] message, int messages, byte[] scratch, byte limit) {
+        int minima = bits.length * lanes;
         for (int l = 0; l < lanes; l += LANES.length()) {
             ByteVector least = ByteVector.fromArray(LANES, scratch, minima + l);
-            ByteVector fromSecond = ByteVector.fromArray(LANES, scratch, minima + lanes + l);
-            ByteVector sign = ByteVector.fromArray(LANES, scratch, minima + 2 * lanes + l);
-            ByteVector fromLeast = ByteVector.fromArray(LANES, scratch, minima + 3 * lanes + l);
+            ByteVector second = ByteVector.fromArray(LANES, scratch, minima + lanes + l);
+            ByteVector first = ByteVector.fromArray(LANES, scratch, minima + 2 * lanes + l);
             for (int i = 0; i < bits.length; i++) {
                 ByteVector t = ByteVector.fromArray(LANES, scratch, i * lanes + l);
-                // Where two edges share the least magnitude both choices are equal.
-                ByteVector m = fromSecond.blend(fromLeast, t.lanewise(ABS).compare(GT, least));
-                m = m.blend(m.neg(), sign.lanewise(XOR, t).compare(LT, (byte) 0));
+                ByteVector m = second.blend(first, t.lanewise(ABS).compare(GT, least));
+                m = m.blend(m.neg(), t.compare(LT, (byte) 0));
                 m.intoArray(message, messages + i * lanes + l);
                 t.add(m).min(limit).max((byte) -limit).intoArray(posterior, bits[i] + l);
+            }
+        }
+    }
+
+    static void addUnsatisfied(CheckRun run, byte[] posterior, byte[] found) {
+        int[] bits = run.bits();
+        for (int l = 0; l < run.lanes(); l += LANES.length()) {
+            ByteVector sum = ByteVector.fromArray(LANES, posterior, bits[0] + l);
+            for (int i = 1; i < bits.length; i++) {
+                sum = sum.lanewise(XOR, ByteVector.fromArray(LANES, posterior, bits[i] + l));
+            }
+            ByteVector.fromArray(LANES, found, l % FRAMES).lanewise(OR, sum).intoArray(found, l % FRAMES);
+        }
+    }
+
+    static void start(byte[] posterior, byte[] received, byte[] keep) {
+        for (int row = 0; row < posterior.length; row += FRAMES) {
+            for (int l = 0; l < FRAMES; l += LANES.length()) {
+                ByteVector from = ByteVector.fromArray(LANES, received, row + l);
+                ByteVector.fromArray(LANES, posterior, row + l)
+                        .lanewise(XOR, from)
+                        .lanewise(AND, ByteVector.fromArray(LANES, keep, l))
+                        .lanewise(XOR, from)
+                        .intoArray(posterior, row + l);
             }
         }
     }

@@ -7,4 +7,4 @@ import java.util.Optional;
  *
  * @param layeredMinSum empty where decoders do better with loops of their own
  */
-record KernelSet(NoiseKernels noise, Optional<LayeredMinSumKernels> layeredMinSum) {}
+record KernelSet(NoiseKernels noise, ReceptionKernels reception, Optional<LayeredMinSumKernels> layeredMinSum) {}

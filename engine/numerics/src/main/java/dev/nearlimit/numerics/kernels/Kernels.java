@@ -24,6 +24,11 @@ public final class Kernels {
         return SET.noise();
     }
 
+    /** The kernels that turn noise into what a decoder reads. */
+    public static ReceptionKernels reception() {
+        return SET.reception();
+    }
+
     /**
      * The kernels of layered fixed-point min-sum; empty in plain Java, where narrow lanes gain nothing and the decoder's
      * own loops, with lanes of 32 bits, are what the JIT makes SIMD of.
@@ -43,7 +48,7 @@ public final class Kernels {
     }
 
     static KernelSet plain() {
-        return new KernelSet(new PlainNoiseKernels(), Optional.empty());
+        return new KernelSet(new PlainNoiseKernels(), new PlainReceptionKernels(), Optional.empty());
     }
 
     private static KernelSet vector() {

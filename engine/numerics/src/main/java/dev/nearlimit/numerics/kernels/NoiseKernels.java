@@ -21,22 +21,23 @@ public interface NoiseKernels {
     void fill(long[] state, long[] draws, int steps);
 
     /**
-     * Parts draws into halves.
+     * Steps the lanes like {@link #fill} and parts the draws into halves. Lanes of even number stand first in the state,
+     * so that halves of two neighbours lie side by side without moving anything across a register.
      *
-     * @param high receives bits 63..32
+     * @param state word w of lane l at 64*w + l/2 for even l, at 64*w + 32 + (l-1)/2 for odd l; is moved on
+     * @param high receives bits 63..32 of draw s of lane l at 64*s + l
      * @param low receives bits 31..0
-     * @param count draws, a multiple of 64
+     * @param steps rows to fill
      */
-    void split(long[] draws, int[] high, int[] low, int count);
+    void halves(long[] state, int[] high, int[] low, int steps);
 
     /**
-     * Whether any radius draw is below {@link Radius#REFINED_CELLS} cells: such draws are rare and are refined by the
-     * caller.
+     * radius[i] = {@link Radius#ofDraw}(high[i]); count is a multiple of 64.
+     *
+     * @return whether any draw is below {@link Radius#REFINED_CELLS} cells: such draws are rare and are refined by the
+     *     caller
      */
-    boolean anyInTail(int[] high, int count);
-
-    /** radius[i] = {@link Radius#ofDraw}(high[i]); count is a multiple of 64. */
-    void radius(int[] high, float[] radius, int count);
+    boolean radius(int[] high, float[] radius, int count);
 
     /**
      * Turns radii into pairs of samples.
@@ -47,8 +48,9 @@ public interface NoiseKernels {
      *
      * @param low angle draws, row-major
      * @param radius radii, row-major
-     * @param samples receives pair j of lane l at 128*j + l and 128*j + 64 + l
+     * @param samples receives pair j of lane l at {@code at} + 128*j + l and {@code at} + 128*j + 64 + l
+     * @param at where the samples begin
      * @param count pairs, a multiple of 64
      */
-    void rotate(int[] low, float[] radius, float[] samples, int count);
+    void rotate(int[] low, float[] radius, float[] samples, int at, int count);
 }

@@ -6,6 +6,8 @@ final class PlainNoiseKernels implements NoiseKernels {
     private static final float ANGLE_UNIT = (float) (Math.PI / 4 / 2147483648.0);
     private static final int SIGN = 0x80000000;
 
+    private final long[] row = new long[LANES];
+
     @Override
     public String name() {
         return "plain";
@@ -39,39 +41,38 @@ final class PlainNoiseKernels implements NoiseKernels {
     }
 
     @Override
-    public void split(long[] draws, int[] high, int[] low, int count) {
-        for (int i = 0; i < count; i++) {
-            long draw = draws[i];
-            high[i] = (int) (draw >>> 32);
-            low[i] = (int) draw;
+    public void halves(long[] state, int[] high, int[] low, int steps) {
+        for (int s = 0; s < steps; s++) {
+            step(state, row, 0);
+            for (int l = 0; l < LANES; l++) {
+                long draw = row[(l >> 1) + (l & 1) * (LANES / 2)];
+                high[s * LANES + l] = (int) (draw >>> 32);
+                low[s * LANES + l] = (int) draw;
+            }
         }
     }
 
     @Override
-    public boolean anyInTail(int[] high, int count) {
+    public boolean radius(int[] high, float[] radius, int count) {
         // Only a cell below 64 makes high >>> 7 zero and so the difference negative.
         int signs = 0;
         for (int i = 0; i < count; i++) {
             signs |= (high[i] >>> 7) - 1;
         }
+        for (int i = 0; i < count; i++) {
+            radius[i] = Radius.ofDraw(high[i]);
+        }
         return signs < 0;
     }
 
     @Override
-    public void radius(int[] high, float[] radius, int count) {
-        for (int i = 0; i < count; i++) {
-            radius[i] = Radius.ofDraw(high[i]);
-        }
-    }
-
-    @Override
-    public void rotate(int[] low, float[] radius, float[] samples, int count) {
+    public void rotate(int[] low, float[] radius, float[] samples, int at, int count) {
         for (int row = 0; row < count; row += LANES) {
-            rotateRow(low, radius, samples, row);
+            rotateRow(low, radius, samples, at + 2 * row, row);
         }
     }
 
-    private static void rotateRow(int[] low, float[] radius, float[] samples, int row) {
+    private static void rotateRow(int[] low, float[] radius, float[] samples, int at, int row) {
         for (int l = 0; l < LANES; l++) {
             int b = low[row + l];
             float r = radius[row + l];
@@ -82,8 +83,8 @@ final class PlainNoiseKernels implements NoiseKernels {
             int x = Float.floatToRawIntBits(c) ^ (b & SIGN);
             int y = Float.floatToRawIntBits(s);
             int exchange = (x ^ y) & (b << 1 >> 31);
-            samples[2 * row + l] = Float.intBitsToFloat(x ^ exchange);
-            samples[2 * row + LANES + l] = Float.intBitsToFloat(y ^ exchange);
+            samples[at + l] = Float.intBitsToFloat(x ^ exchange);
+            samples[at + LANES + l] = Float.intBitsToFloat(y ^ exchange);
         }
     }
 

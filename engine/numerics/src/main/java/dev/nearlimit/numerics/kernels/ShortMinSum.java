@@ -1,9 +1,11 @@
 package dev.nearlimit.numerics.kernels;
 
 import static jdk.incubator.vector.VectorOperators.ABS;
+import static jdk.incubator.vector.VectorOperators.AND;
 import static jdk.incubator.vector.VectorOperators.GT;
 import static jdk.incubator.vector.VectorOperators.LSHR;
 import static jdk.incubator.vector.VectorOperators.LT;
+import static jdk.incubator.vector.VectorOperators.OR;
 import static jdk.incubator.vector.VectorOperators.XOR;
 
 import jdk.incubator.vector.ShortVector;
@@ -16,24 +18,92 @@ import jdk.incubator.vector.VectorSpecies;
  */
 final class ShortMinSum {
     private static final VectorSpecies<Short> LANES = ShortVector.SPECIES_PREFERRED;
+    private static final int FRAMES = 64;
 
     private ShortMinSum() {}
 
     static void update(CheckRun run, MinSumArithmetic arithmetic, short[] posterior, short[] message, short[] scratch) {
         int lanes = run.lanes();
         int[] bits = run.bits();
-        int minima = bits.length * lanes;
-        read(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestMessage());
-        correct(scratch, minima, lanes, arithmetic.eighths(), (short) arithmetic.offset());
-        send(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestPosterior());
+        short largest = (short) arithmetic.largestMessage();
+        if (lanes % (2 * LANES.length()) == 0) {
+            read(bits, lanes, posterior, message, run.messages(), scratch, largest);
+            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (short) arithmetic.offset());
+            send(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestPosterior());
+        } else {
+            readSingly(bits, lanes, posterior, message, run.messages(), scratch, largest);
+            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (short) arithmetic.offset());
+            sendSingly(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestPosterior());
+        }
+    }
+
+    static void updateStarting(
+            CheckRun run,
+            MinSumArithmetic arithmetic,
+            short[] posterior,
+            short[] message,
+            short[] scratch,
+            short[] keep) {
+        int lanes = run.lanes();
+        int[] bits = run.bits();
+        dropStarting(bits.length, lanes, message, run.messages(), keep);
+        update(run, arithmetic, posterior, message, scratch);
+    }
+
+    private static void dropStarting(int edges, int lanes, short[] message, int messages, short[] keep) {
+        for (int l = 0; l < lanes; l += LANES.length()) {
+            ShortVector kept = ShortVector.fromArray(LANES, keep, l);
+            for (int i = 0; i < edges; i++) {
+                int at = messages + i * lanes + l;
+                ShortVector.fromArray(LANES, message, at).lanewise(AND, kept).intoArray(message, at);
+            }
+        }
     }
 
     /** Leaves t of every edge, then a row each of the least magnitude, the second, and the product of the signs. */
     private static void read(
             int[] bits, int lanes, short[] posterior, short[] message, int messages, short[] scratch, short largest) {
         int minima = bits.length * lanes;
-        for (int l = 0; l < lanes; l += LANES.length()) {
+        for (int l = 0; l < lanes; l += 2 * LANES.length()) {
+            int k = l + LANES.length();
             // Starting both minima at the largest message limits every magnitude to it at no cost.
+            ShortVector least = ShortVector.broadcast(LANES, largest);
+            ShortVector second = least;
+            ShortVector sign = ShortVector.zero(LANES);
+            ShortVector leastOfNext = least;
+            ShortVector secondOfNext = least;
+            ShortVector signOfNext = sign;
+            for (int i = 0; i < bits.length; i++) {
+                int edge = messages + i * lanes;
+                ShortVector t = ShortVector.fromArray(LANES, posterior, bits[i] + l)
+                        .sub(ShortVector.fromArray(LANES, message, edge + l));
+                ShortVector u = ShortVector.fromArray(LANES, posterior, bits[i] + k)
+                        .sub(ShortVector.fromArray(LANES, message, edge + k));
+                t.intoArray(scratch, i * lanes + l);
+                u.intoArray(scratch, i * lanes + k);
+                sign = sign.lanewise(XOR, t);
+                signOfNext = signOfNext.lanewise(XOR, u);
+                t = t.lanewise(ABS);
+                u = u.lanewise(ABS);
+                second = second.min(least.max(t));
+                secondOfNext = secondOfNext.min(leastOfNext.max(u));
+                least = least.min(t);
+                leastOfNext = leastOfNext.min(u);
+            }
+            least.intoArray(scratch, minima + l);
+            leastOfNext.intoArray(scratch, minima + k);
+            second.intoArray(scratch, minima + lanes + l);
+            secondOfNext.intoArray(scratch, minima + lanes + k);
+            sign.intoArray(scratch, minima + 2 * lanes + l);
+            signOfNext.intoArray(scratch, minima + 2 * lanes + k);
+        }
+    }
+
+    /** {@link #read} one vector at a time, for registers so wide that a check has an odd number of them. */
+    private static void readSingly(
+            int[] bits, int lanes, short[] posterior, short[] message, int messages, short[] scratch, short largest) {
+        int minima = bits.length * lanes;
+        for (int l = 0; l < lanes; l += LANES.length()) {
             ShortVector least = ShortVector.broadcast(LANES, largest);
             ShortVector second = least;
             ShortVector sign = ShortVector.zero(LANES);
@@ -53,8 +123,8 @@ final class ShortMinSum {
     }
 
     /**
-     * Corrects what is sent: the second magnitude in its place, the least in a fourth row, since edges are told apart by
-     * the least as it was.
+     * Corrects what is sent and gives it the product of all signs: the second magnitude in its place, the least in the
+     * third row, since edges are told apart by the least as it was.
      */
     private static void correct(short[] scratch, int minima, int lanes, int eighths, short offset) {
         for (int l = minima; l < minima + lanes; l += LANES.length()) {
@@ -64,8 +134,11 @@ final class ShortMinSum {
                 least = scaled(least, (short) eighths);
                 second = scaled(second, (short) eighths);
             }
-            second.sub(offset).max((short) 0).intoArray(scratch, l + lanes);
-            least.sub(offset).max((short) 0).intoArray(scratch, l + 3 * lanes);
+            least = least.sub(offset).max((short) 0);
+            second = second.sub(offset).max((short) 0);
+            var negative = ShortVector.fromArray(LANES, scratch, l + 2 * lanes).compare(LT, (short) 0);
+            second.blend(second.neg(), negative).intoArray(scratch, l + lanes);
+            least.blend(least.neg(), negative).intoArray(scratch, l + 2 * lanes);
         }
     }
 
@@ -77,19 +150,57 @@ final class ShortMinSum {
     private static void send(
             int[] bits, int lanes, short[] posterior, short[] message, int messages, short[] scratch, short limit) {
         int minima = bits.length * lanes;
+        for (int l = 0; l < lanes; l += 2 * LANES.length()) {
+            int k = l + LANES.length();
+            ShortVector least = ShortVector.fromArray(LANES, scratch, minima + l);
+            ShortVector leastOfNext = ShortVector.fromArray(LANES, scratch, minima + k);
+            ShortVector second = ShortVector.fromArray(LANES, scratch, minima + lanes + l);
+            ShortVector secondOfNext = ShortVector.fromArray(LANES, scratch, minima + lanes + k);
+            ShortVector first = ShortVector.fromArray(LANES, scratch, minima + 2 * lanes + l);
+            ShortVector firstOfNext = ShortVector.fromArray(LANES, scratch, minima + 2 * lanes + k);
+            for (int i = 0; i < bits.length; i++) {
+                int edge = messages + i * lanes;
+                ShortVector t = ShortVector.fromArray(LANES, scratch, i * lanes + l);
+                ShortVector u = ShortVector.fromArray(LANES, scratch, i * lanes + k);
+                // Where two edges share the least magnitude both choices are equal.
+                ShortVector m = second.blend(first, t.lanewise(ABS).compare(GT, least));
+                ShortVector n = secondOfNext.blend(firstOfNext, u.lanewise(ABS).compare(GT, leastOfNext));
+                m = m.blend(m.neg(), t.compare(LT, (short) 0));
+                n = n.blend(n.neg(), u.compare(LT, (short) 0));
+                m.intoArray(message, edge + l);
+                n.intoArray(message, edge + k);
+                t.add(m).min(limit).max((short) -limit).intoArray(posterior, bits[i] + l);
+                u.add(n).min(limit).max((short) -limit).intoArray(posterior, bits[i] + k);
+            }
+        }
+    }
+
+    /** {@link #send} one vector at a time. */
+    private static void sendSingly(
+            int[] bits, int lanes, short[] posterior, short[] message, int messages, short[] scratch, short limit) {
+        int minima = bits.length * lanes;
         for (int l = 0; l < lanes; l += LANES.length()) {
             ShortVector least = ShortVector.fromArray(LANES, scratch, minima + l);
-            ShortVector fromSecond = ShortVector.fromArray(LANES, scratch, minima + lanes + l);
-            ShortVector sign = ShortVector.fromArray(LANES, scratch, minima + 2 * lanes + l);
-            ShortVector fromLeast = ShortVector.fromArray(LANES, scratch, minima + 3 * lanes + l);
+            ShortVector second = ShortVector.fromArray(LANES, scratch, minima + lanes + l);
+            ShortVector first = ShortVector.fromArray(LANES, scratch, minima + 2 * lanes + l);
             for (int i = 0; i < bits.length; i++) {
                 ShortVector t = ShortVector.fromArray(LANES, scratch, i * lanes + l);
-                // Where two edges share the least magnitude both choices are equal.
-                ShortVector m = fromSecond.blend(fromLeast, t.lanewise(ABS).compare(GT, least));
-                m = m.blend(m.neg(), sign.lanewise(XOR, t).compare(LT, (short) 0));
+                ShortVector m = second.blend(first, t.lanewise(ABS).compare(GT, least));
+                m = m.blend(m.neg(), t.compare(LT, (short) 0));
                 m.intoArray(message, messages + i * lanes + l);
                 t.add(m).min(limit).max((short) -limit).intoArray(posterior, bits[i] + l);
             }
+        }
+    }
+
+    static void addUnsatisfied(CheckRun run, short[] posterior, short[] found) {
+        int[] bits = run.bits();
+        for (int l = 0; l < run.lanes(); l += LANES.length()) {
+            ShortVector sum = ShortVector.fromArray(LANES, posterior, bits[0] + l);
+            for (int i = 1; i < bits.length; i++) {
+                sum = sum.lanewise(XOR, ShortVector.fromArray(LANES, posterior, bits[i] + l));
+            }
+            ShortVector.fromArray(LANES, found, l % FRAMES).lanewise(OR, sum).intoArray(found, l % FRAMES);
         }
     }
 }

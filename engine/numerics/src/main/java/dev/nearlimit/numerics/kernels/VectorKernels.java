@@ -7,6 +7,9 @@ final class VectorKernels {
     private VectorKernels() {}
 
     static KernelSet all() {
-        return new KernelSet(new VectorNoiseKernels(), Optional.of(new VectorMinSumKernels()));
+        return new KernelSet(
+                new VectorNoiseKernels(),
+                VectorReceptionKernels.fits() ? new VectorReceptionKernels() : new PlainReceptionKernels(),
+                Optional.of(new VectorMinSumKernels()));
     }
 }

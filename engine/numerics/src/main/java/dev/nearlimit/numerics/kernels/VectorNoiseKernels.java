@@ -12,8 +12,6 @@ import static jdk.incubator.vector.VectorOperators.XOR;
 import jdk.incubator.vector.FloatVector;
 import jdk.incubator.vector.IntVector;
 import jdk.incubator.vector.LongVector;
-import jdk.incubator.vector.VectorMask;
-import jdk.incubator.vector.VectorShuffle;
 import jdk.incubator.vector.VectorSpecies;
 
 /**
@@ -31,17 +29,8 @@ final class VectorNoiseKernels implements NoiseKernels {
     private static final int SQRT_HALF_BITS = 0x3f3504f3;
     private static final float LN_2 = 0.69314718056f;
 
-    private static final int HALF = INTS.length() / 2;
-    /** Even lanes to the lower half, odd lanes to the upper. */
-    private static final VectorShuffle<Integer> EVEN_ODD =
-            VectorShuffle.fromOp(INTS, i -> i < HALF ? 2 * i : 2 * (i - HALF) + 1);
-    /** Odd lanes to the lower half, even lanes to the upper. */
-    private static final VectorShuffle<Integer> ODD_EVEN =
-            VectorShuffle.fromOp(INTS, i -> i < HALF ? 2 * i + 1 : 2 * (i - HALF));
-
-    private static final VectorShuffle<Integer> EXCHANGE_HALVES =
-            VectorShuffle.fromOp(INTS, i -> (i + HALF) % (2 * HALF));
-    private static final VectorMask<Integer> UPPER = VectorMask.fromLong(INTS, -1L << HALF);
+    private static final long UPPER_HALF = 0xFFFFFFFF00000000L;
+    private static final long LOWER_HALF = 0x00000000FFFFFFFFL;
 
     @Override
     public String name() {
@@ -77,49 +66,83 @@ final class VectorNoiseKernels implements NoiseKernels {
     }
 
     @Override
-    public void split(long[] draws, int[] high, int[] low, int count) {
-        // Seen as ints the lower half of a long is the even lane, on processors of either byte order.
-        for (int i = 0; i < count; i += INTS.length()) {
-            IntVector a =
-                    LongVector.fromArray(LONGS, draws, i).reinterpretAsInts().rearrange(EVEN_ODD);
-            IntVector b = LongVector.fromArray(LONGS, draws, i + HALF)
-                    .reinterpretAsInts()
-                    .rearrange(ODD_EVEN);
-            a.blend(b, UPPER).intoArray(low, i);
-            b.blend(a, UPPER).rearrange(EXCHANGE_HALVES).intoArray(high, i);
+    public void halves(long[] state, int[] high, int[] low, int steps) {
+        for (int l = 0; l < LANES / 2; l += LONGS.length()) {
+            halvesOfLanes(state, high, low, l, steps);
         }
     }
 
+    /** Two vectors at a time, the even lanes of a row's part and its odd ones, which also keeps the processor busier. */
+    private static void halvesOfLanes(long[] state, int[] high, int[] low, int l, int steps) {
+        int o = l + LANES / 2;
+        LongVector a0 = LongVector.fromArray(LONGS, state, l);
+        LongVector a1 = LongVector.fromArray(LONGS, state, LANES + l);
+        LongVector a2 = LongVector.fromArray(LONGS, state, 2 * LANES + l);
+        LongVector a3 = LongVector.fromArray(LONGS, state, 3 * LANES + l);
+        LongVector b0 = LongVector.fromArray(LONGS, state, o);
+        LongVector b1 = LongVector.fromArray(LONGS, state, LANES + o);
+        LongVector b2 = LongVector.fromArray(LONGS, state, 2 * LANES + o);
+        LongVector b3 = LongVector.fromArray(LONGS, state, 3 * LANES + o);
+        for (int s = 0; s < steps; s++) {
+            LongVector even = a0.add(a3).lanewise(ROL, 23).add(a0);
+            LongVector odd = b0.add(b3).lanewise(ROL, 23).add(b0);
+            int at = s * LANES + 2 * l;
+            // Seen as ints the lower half of a long is the even lane.
+            odd.lanewise(AND, UPPER_HALF)
+                    .lanewise(OR, even.lanewise(LSHR, 32))
+                    .reinterpretAsInts()
+                    .intoArray(high, at);
+            odd.lanewise(LSHL, 32)
+                    .lanewise(OR, even.lanewise(AND, LOWER_HALF))
+                    .reinterpretAsInts()
+                    .intoArray(low, at);
+            LongVector t = a1.lanewise(LSHL, 17);
+            a2 = a2.lanewise(XOR, a0);
+            a3 = a3.lanewise(XOR, a1);
+            a1 = a1.lanewise(XOR, a2);
+            a0 = a0.lanewise(XOR, a3);
+            a2 = a2.lanewise(XOR, t);
+            a3 = a3.lanewise(ROL, 45);
+            t = b1.lanewise(LSHL, 17);
+            b2 = b2.lanewise(XOR, b0);
+            b3 = b3.lanewise(XOR, b1);
+            b1 = b1.lanewise(XOR, b2);
+            b0 = b0.lanewise(XOR, b3);
+            b2 = b2.lanewise(XOR, t);
+            b3 = b3.lanewise(ROL, 45);
+        }
+        a0.intoArray(state, l);
+        a1.intoArray(state, LANES + l);
+        a2.intoArray(state, 2 * LANES + l);
+        a3.intoArray(state, 3 * LANES + l);
+        b0.intoArray(state, o);
+        b1.intoArray(state, LANES + o);
+        b2.intoArray(state, 2 * LANES + o);
+        b3.intoArray(state, 3 * LANES + o);
+    }
+
     @Override
-    public boolean anyInTail(int[] high, int count) {
+    public boolean radius(int[] high, float[] radius, int count) {
         IntVector signs = IntVector.zero(INTS);
         for (int i = 0; i < count; i += INTS.length()) {
-            signs = signs.lanewise(
-                    OR, IntVector.fromArray(INTS, high, i).lanewise(LSHR, 7).sub(1));
+            IntVector draw = IntVector.fromArray(INTS, high, i);
+            signs = signs.lanewise(OR, draw.lanewise(LSHR, 7).sub(1));
+            radiusOf(draw.lanewise(LSHR, 1)).intoArray(radius, i);
         }
         return signs.reduceLanes(OR) < 0;
     }
 
-    @Override
-    public void radius(int[] high, float[] radius, int count) {
-        for (int i = 0; i < count; i += INTS.length()) {
-            IntVector cell = IntVector.fromArray(INTS, high, i).lanewise(LSHR, 1);
-            FloatVector w = ((FloatVector) cell.convert(I2F, 0)).add(0.5f);
-            IntVector bits = w.viewAsIntegralLanes();
-            IntVector e = bits.sub(SQRT_HALF_BITS).lanewise(ASHR, 23);
-            FloatVector m = bits.sub(e.lanewise(LSHL, 23)).viewAsFloatingLanes().sub(1f);
-            FloatVector exponent = ((FloatVector) e.convert(I2F, 0)).sub(31f).mul(LN_2);
-            FloatVector z = m.mul(m);
-            FloatVector ln =
-                    logarithmPolynomial(m).mul(m).mul(z).sub(z.mul(0.5f)).add(m).add(exponent);
-            // As integers, floats below zero and -0 are below 0, so this is the maximum with +0 of plain Java.
-            ln.mul(-2f)
-                    .viewAsIntegralLanes()
-                    .max(0)
-                    .viewAsFloatingLanes()
-                    .sqrt()
-                    .intoArray(radius, i);
-        }
+    private static FloatVector radiusOf(IntVector cell) {
+        FloatVector w = ((FloatVector) cell.convert(I2F, 0)).add(0.5f);
+        IntVector bits = w.viewAsIntegralLanes();
+        IntVector e = bits.sub(SQRT_HALF_BITS).lanewise(ASHR, 23);
+        FloatVector m = bits.sub(e.lanewise(LSHL, 23)).viewAsFloatingLanes().sub(1f);
+        FloatVector exponent = ((FloatVector) e.convert(I2F, 0)).sub(31f).mul(LN_2);
+        FloatVector z = m.mul(m);
+        FloatVector ln =
+                logarithmPolynomial(m).mul(m).mul(z).sub(z.mul(0.5f)).add(m).add(exponent);
+        // As integers, floats below zero and -0 are below 0, so this is the maximum with +0 of plain Java.
+        return ln.mul(-2f).viewAsIntegralLanes().max(0).viewAsFloatingLanes().sqrt();
     }
 
     private static FloatVector logarithmPolynomial(FloatVector m) {
@@ -142,13 +165,13 @@ final class VectorNoiseKernels implements NoiseKernels {
     }
 
     @Override
-    public void rotate(int[] low, float[] radius, float[] samples, int count) {
+    public void rotate(int[] low, float[] radius, float[] samples, int at, int count) {
         for (int row = 0; row < count; row += LANES) {
-            rotateRow(low, radius, samples, row);
+            rotateRow(low, radius, samples, at + 2 * row, row);
         }
     }
 
-    private static void rotateRow(int[] low, float[] radius, float[] samples, int row) {
+    private static void rotateRow(int[] low, float[] radius, float[] samples, int at, int row) {
         for (int l = 0; l < LANES; l += INTS.length()) {
             IntVector b = IntVector.fromArray(INTS, low, row + l);
             FloatVector r = FloatVector.fromArray(FLOATS, radius, row + l);
@@ -158,8 +181,8 @@ final class VectorNoiseKernels implements NoiseKernels {
             IntVector y = r.mul(sine(t, t2)).viewAsIntegralLanes();
             IntVector exchange =
                     x.lanewise(XOR, y).lanewise(AND, b.lanewise(LSHL, 1).lanewise(ASHR, 31));
-            x.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, 2 * row + l);
-            y.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, 2 * row + LANES + l);
+            x.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, at + l);
+            y.lanewise(XOR, exchange).viewAsFloatingLanes().intoArray(samples, at + LANES + l);
         }
     }
 

@@ -16,17 +16,19 @@ public final class GaussianNoise {
     public static final int REVISION = 1;
 
     private static final int LANES = FrameStreams.LANES;
-    /** 16 rows: 8 KB of draws, 4 KB each of halves and radii, 8 KB of samples stay in the first-level cache. */
+    /** 16 rows: 4 KB each of halves and radii, 8 KB of samples stay in the first-level cache. */
     private static final int ROWS = 16;
 
     private final FrameStreams streams;
     private final NoiseKernels kernels;
     private final long[] state = new long[FrameStreams.STATE_WORDS * LANES];
-    private final long[] draws = new long[ROWS * LANES];
+    private final long[] straight = new long[state.length];
     private final int[] high = new int[ROWS * LANES];
     private final int[] low = new int[ROWS * LANES];
     private final float[] radius = new float[ROWS * LANES];
-    private final float[] pairs = new float[2 * ROWS * LANES];
+    private final float[] lastPair = new float[2 * LANES];
+    private long frame;
+    private int pairsDone;
 
     /** Noise from these streams; they must not be shared with another thread. */
     public GaussianNoise(FrameStreams streams) {
@@ -38,39 +40,67 @@ public final class GaussianNoise {
         this.kernels = kernels;
     }
 
+    /** Goes to the first dimension of 64 frames in a row, the first of them in lane 0. */
+    public void start(long firstFrame) {
+        streams.start(firstFrame, straight);
+        for (int i = 0; i < state.length; i += LANES) {
+            for (int lane = 0; lane < LANES; lane += 2) {
+                state[i + lane / 2] = straight[i + lane];
+                state[i + LANES / 2 + lane / 2] = straight[i + lane + 1];
+            }
+        }
+        frame = firstFrame;
+        pairsDone = 0;
+    }
+
     /**
-     * The first samples of 64 frames.
+     * The next dimensions of the 64 frames.
+     *
+     * @param samples receives the d-th of these dimensions of lane f at {@code at} + 64*d + f
+     * @param at where they begin
+     * @param dimensions samples a frame; of an odd number the last draw's second sample is dropped
+     */
+    public void next(float[] samples, int at, int dimensions) {
+        for (int done = 0; done < dimensions; done += 2 * ROWS) {
+            int wanted = Math.min(2 * ROWS, dimensions - done);
+            drawRadii((wanted + 1) / 2);
+            kernels.rotate(low, radius, samples, at + done * LANES, wanted / 2 * LANES);
+            if (wanted % 2 != 0) {
+                int pair = wanted / 2 * LANES;
+                System.arraycopy(low, pair, low, 0, LANES);
+                System.arraycopy(radius, pair, radius, 0, LANES);
+                kernels.rotate(low, radius, lastPair, 0, LANES);
+                System.arraycopy(lastPair, 0, samples, at + (done + wanted - 1) * LANES, LANES);
+            }
+        }
+    }
+
+    /**
+     * The first samples of 64 frames: {@link #start} and {@link #next} in one.
      *
      * @param firstFrame number of the frame in lane 0
      * @param samples receives dimension d of lane f at 64*d + f
-     * @param dimensions samples a frame; of an odd number the last draw's second sample is dropped
+     * @param dimensions samples a frame
      */
     public void fill(long firstFrame, float[] samples, int dimensions) {
-        streams.start(firstFrame, state);
-        for (int done = 0; done < dimensions; done += 2 * ROWS) {
-            int wanted = Math.min(2 * ROWS, dimensions - done);
-            nextPairs(firstFrame, done / 2, (wanted + 1) / 2);
-            System.arraycopy(pairs, 0, samples, done * LANES, wanted * LANES);
-        }
+        start(firstFrame);
+        next(samples, 0, dimensions);
     }
 
-    private void nextPairs(long firstFrame, int firstPair, int rows) {
+    private void drawRadii(int rows) {
         int count = rows * LANES;
-        kernels.fill(state, draws, rows);
-        kernels.split(draws, high, low, count);
-        kernels.radius(high, radius, count);
-        if (kernels.anyInTail(high, count)) {
-            refine(firstFrame, firstPair, count);
+        kernels.halves(state, high, low, rows);
+        if (kernels.radius(high, radius, count)) {
+            refine(count);
         }
-        kernels.rotate(low, radius, pairs, count);
+        pairsDone += rows;
     }
 
-    private void refine(long firstFrame, int firstPair, int count) {
+    private void refine(int count) {
         for (int i = 0; i < count; i++) {
             int cell = Radius.cell(high[i]);
             if (cell < Radius.REFINED_CELLS) {
-                int position = firstPair + i / LANES;
-                radius[i] = Radius.refined(cell, streams.aside(firstFrame + i % LANES, position));
+                radius[i] = Radius.refined(cell, streams.aside(frame + i % LANES, pairsDone + i / LANES));
             }
         }
     }

@@ -68,7 +68,7 @@ class RadiusTest {
             low[i] = (i << 18) + (1 << 17);
             ones[i] = 1f;
         }
-        kernels.rotate(low, ones, unit, angles);
+        kernels.rotate(low, ones, unit, 0, angles);
         double above = 0;
         double below = 0;
         for (float s : unit) {
@@ -119,10 +119,10 @@ class RadiusTest {
         high[3] = -1;
         high[4] = Integer.MIN_VALUE;
         high[5] = 128;
-        assertEquals(false, kernels.anyInTail(high, 128));
+        assertEquals(false, kernels.radius(high, new float[128], 128));
         for (int draw : new int[] {0, 1, 127}) {
             high[77] = draw;
-            assertEquals(true, kernels.anyInTail(high, 128), "draw " + draw);
+            assertEquals(true, kernels.radius(high, new float[128], 128), "draw " + draw);
         }
     }
 }

@@ -38,6 +38,32 @@ class VectorNoiseKernelsTest {
         assertArrayEquals(expectedState, state, steps + " steps");
     }
 
+    /** Halves of the draws that the generator itself gives, lane by lane. */
+    @ParameterizedTest
+    @ValueSource(ints = {0, 1, 2, 15, 16, 33})
+    void halvesAreThoseOfTheDraws(int steps) {
+        Random random = new Random(steps);
+        long[] straight = random.longs(256).toArray();
+        long[] state = new long[256 + GUARD];
+        for (int i = 0; i < 256; i++) {
+            int lane = i % 64;
+            state[i - lane + lane / 2 + lane % 2 * 32] = straight[i];
+        }
+        long[] other = state.clone();
+        long[] draws = new long[64 * steps];
+        plain.fill(straight, draws, steps);
+        int[][] high = pair(random.ints(64 * steps + GUARD).toArray());
+        int[][] low = pair(random.ints(64 * steps + GUARD).toArray());
+        plain.halves(state, high[0], low[0], steps);
+        vector.halves(other, high[1], low[1], steps);
+        assertArrayEquals(state, other);
+        assertArrayEquals(high[0], high[1]);
+        assertArrayEquals(low[0], low[1]);
+        for (int i = 0; i < draws.length; i++) {
+            assertEquals(draws[i], (long) high[0][i] << 32 | (low[0][i] & 0xFFFFFFFFL), "draw " + i);
+        }
+    }
+
     @ParameterizedTest
     @ValueSource(ints = {0, 64, 128, 1024, 64 * 33})
     void everyPassGivesTheSameBits(int count) {
@@ -54,10 +80,10 @@ class VectorNoiseKernelsTest {
             }
             int[][] high = pair(random.ints(count + GUARD).toArray());
             int[][] low = pair(random.ints(count + GUARD).toArray());
-            plain.split(draws, high[0], low[0], count);
-            vector.split(draws, high[1], low[1], count);
-            assertArrayEquals(high[0], high[1], where);
-            assertArrayEquals(low[0], low[1], where);
+            for (int i = 0; i < count; i++) {
+                high[0][i] = high[1][i] = (int) (draws[i] >>> 32);
+                low[0][i] = low[1][i] = (int) draws[i];
+            }
 
             float[][] radius = guarded(count);
             plain.radius(high[0], radius[0], count);
@@ -65,8 +91,8 @@ class VectorNoiseKernelsTest {
             assertSameBits(radius[0], radius[1], where);
 
             float[][] samples = guarded(2 * count);
-            plain.rotate(low[0], radius[0], samples[0], count);
-            vector.rotate(low[0], radius[0], samples[1], count);
+            plain.rotate(low[0], radius[0], samples[0], 3, count);
+            vector.rotate(low[0], radius[0], samples[1], 3, count);
             assertSameBits(samples[0], samples[1], where);
         }
     }
@@ -92,15 +118,16 @@ class VectorNoiseKernelsTest {
     void findsTheTailWhereverItStands(int count) {
         Random random = new Random(count);
         int[] high = random.ints(count + GUARD, 128, Integer.MAX_VALUE).toArray();
+        float[] radius = new float[count];
         high[count] = 0; // beyond what is asked for
         high[1] = -1;
         high[2] = 128;
         high[3] = Integer.MIN_VALUE;
-        assertEquals(false, vector.anyInTail(high, count));
+        assertEquals(false, vector.radius(high, radius, count));
         for (int i = 0; i < count; i++) {
             int kept = high[i];
             high[i] = random.nextInt(128);
-            assertTrue(vector.anyInTail(high, count), "draw " + i + " of " + count);
+            assertTrue(vector.radius(high, radius, count), "draw " + i + " of " + count);
             high[i] = kept;
         }
     }

@@ -197,23 +197,22 @@ class GaussianNoiseTest {
         }
 
         @Override
-        public void split(long[] draws, int[] high, int[] low, int count) {
-            plain.split(draws, high, low, count);
+        public void halves(long[] state, int[] high, int[] low, int steps) {
+            for (int i = 0; i < 64 * steps; i++) {
+                long draw = forced[next++];
+                high[i] = (int) (draw >>> 32);
+                low[i] = (int) draw;
+            }
         }
 
         @Override
-        public boolean anyInTail(int[] high, int count) {
-            return plain.anyInTail(high, count);
+        public boolean radius(int[] high, float[] radius, int count) {
+            return plain.radius(high, radius, count);
         }
 
         @Override
-        public void radius(int[] high, float[] radius, int count) {
-            plain.radius(high, radius, count);
-        }
-
-        @Override
-        public void rotate(int[] low, float[] radius, float[] samples, int count) {
-            plain.rotate(low, radius, samples, count);
+        public void rotate(int[] low, float[] radius, float[] samples, int at, int count) {
+            plain.rotate(low, radius, samples, at, count);
         }
     }
 }

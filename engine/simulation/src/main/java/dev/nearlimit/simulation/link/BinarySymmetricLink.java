@@ -1,7 +1,6 @@
 package dev.nearlimit.simulation.link;
 
 import dev.nearlimit.codes.batch.FrameBatch;
-import dev.nearlimit.decoders.batch.LlrBatch;
 import dev.nearlimit.numerics.noise.UniformDraws;
 import java.math.BigDecimal;
 import java.math.BigInteger;
@@ -12,12 +11,11 @@ import java.math.BigInteger;
  */
 public final class BinarySymmetricLink implements Link {
     private static final BigDecimal TWO_TO_64 = new BigDecimal(BigInteger.ONE.shiftLeft(64));
-    private static final int ROWS = 16;
 
     private final UniformDraws draws;
     private final long threshold;
     private final float llr;
-    private final long[] rows = new long[ROWS * FrameBatch.FRAMES];
+    private final long[] rows = new long[MOST_POSITIONS * FrameBatch.FRAMES];
 
     /**
      * A link of one crossover probability.
@@ -37,14 +35,15 @@ public final class BinarySymmetricLink implements Link {
     }
 
     @Override
-    public void carry(long firstFrame, long[] codeword, LlrBatch received) {
+    public void start(long firstFrame) {
         draws.start(firstFrame);
-        for (int first = 0; first < received.n(); first += ROWS) {
-            int count = Math.min(ROWS, received.n() - first);
-            draws.next(rows, count);
-            for (int r = 0; r < count; r++) {
-                decide(codeword[first + r], r * FrameBatch.FRAMES, received.values(), (first + r) * FrameBatch.FRAMES);
-            }
+    }
+
+    @Override
+    public void carry(long[] codeword, int first, int count, float[] values, int at) {
+        draws.next(rows, count);
+        for (int p = 0; p < count; p++) {
+            decide(codeword[first + p], p * FrameBatch.FRAMES, values, at + p * FrameBatch.FRAMES);
         }
     }
 

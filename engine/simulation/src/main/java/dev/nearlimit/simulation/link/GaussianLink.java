@@ -1,7 +1,6 @@
 package dev.nearlimit.simulation.link;
 
-import dev.nearlimit.codes.batch.FrameBatch;
-import dev.nearlimit.decoders.batch.LlrBatch;
+import dev.nearlimit.numerics.kernels.Kernels;
 import dev.nearlimit.numerics.noise.GaussianNoise;
 
 /**
@@ -49,17 +48,13 @@ public final class GaussianLink implements Link {
     }
 
     @Override
-    public void carry(long firstFrame, long[] codeword, LlrBatch received) {
-        float[] values = received.values();
-        noise.fill(firstFrame, values, received.n());
-        for (int i = 0; i < received.n(); i++) {
-            demap(codeword[i], values, i * FrameBatch.FRAMES);
-        }
+    public void start(long firstFrame) {
+        noise.start(firstFrame);
     }
 
-    private void demap(long bits, float[] values, int at) {
-        for (int f = 0; f < FrameBatch.FRAMES; f++) {
-            values[at + f] = (Antipodal.signal(bits, f) + sigma * values[at + f]) * llrOfUnit;
-        }
+    @Override
+    public void carry(long[] codeword, int first, int count, float[] values, int at) {
+        noise.next(values, at, count);
+        Kernels.reception().demap(codeword, first, count, sigma, llrOfUnit, values, at);
     }
 }

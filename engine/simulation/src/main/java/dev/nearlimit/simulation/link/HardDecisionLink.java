@@ -1,7 +1,7 @@
 package dev.nearlimit.simulation.link;
 
 import dev.nearlimit.codes.batch.FrameBatch;
-import dev.nearlimit.decoders.batch.LlrBatch;
+import dev.nearlimit.numerics.kernels.Kernels;
 import dev.nearlimit.numerics.noise.GaussianNoise;
 import org.apache.commons.math3.special.Erf;
 
@@ -41,18 +41,20 @@ public final class HardDecisionLink implements Link {
     }
 
     @Override
-    public void carry(long firstFrame, long[] codeword, LlrBatch received) {
-        float[] values = received.values();
-        noise.fill(firstFrame, values, received.n());
-        for (int i = 0; i < received.n(); i++) {
-            decide(codeword[i], values, i * FrameBatch.FRAMES);
-        }
+    public void start(long firstFrame) {
+        noise.start(firstFrame);
     }
 
-    private void decide(long bits, float[] values, int at) {
-        for (int f = 0; f < FrameBatch.FRAMES; f++) {
-            float y = Antipodal.signal(bits, f) + sigma * values[at + f];
-            values[at + f] = y < 0f ? -llr : llr;
+    @Override
+    public void carry(long[] codeword, int first, int count, float[] values, int at) {
+        noise.next(values, at, count);
+        Kernels.reception().demap(codeword, first, count, sigma, 1f, values, at);
+        decide(values, at, count * FrameBatch.FRAMES);
+    }
+
+    private void decide(float[] values, int at, int count) {
+        for (int i = at; i < at + count; i++) {
+            values[i] = values[i] < 0f ? -llr : llr;
         }
     }
 }
