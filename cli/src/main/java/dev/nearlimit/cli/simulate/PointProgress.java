@@ -59,21 +59,24 @@ final class PointProgress {
     private String detail(long frames, long frameErrors, double done, double elapsedS) {
         Interval fer =
                 new ErrorRateIntervals().frameErrorRate(new PointCounts(frames, frameErrors, 0, 0, 0, 0, false), rule);
+        boolean settled = elapsedS >= SETTLED_S && frames > firstFrames;
         StringBuilder text = new StringBuilder(where);
         if (step.of() > 1) {
             text.append(", ").append(step.number()).append(" of ").append(step.of());
+        }
+        if (settled) {
+            double leftS = (1 - done) * elapsedS / (done - firstDone);
+            text.append(", ").append(Numbers.duration(leftS)).append(" left");
         }
         text.append(": ").append(frameErrors).append(frameErrors == 1 ? " error, " : " errors, ");
         text.append(
                 frameErrors == 0
                         ? "FER below " + Numbers.errorRate(fer.high())
                         : "FER " + Numbers.errorRate(fer.low()) + ".." + Numbers.errorRate(fer.high()));
-        if (elapsedS >= SETTLED_S && frames > firstFrames) {
-            text.append(", ")
-                    .append(Numbers.engineering((frames - firstFrames) / elapsedS))
-                    .append("/s, ");
-            text.append(Numbers.duration((1 - done) * elapsedS / (done - firstDone)))
-                    .append(" to go");
+        if (settled) {
+            double framesPerS = (frames - firstFrames) / elapsedS;
+            // What does not fit the terminal is cut off at the end, so the least important comes last.
+            text.append(", ").append(Numbers.engineering(framesPerS)).append(" frames/s");
         }
         return text.toString();
     }

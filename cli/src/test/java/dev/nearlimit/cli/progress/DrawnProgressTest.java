@@ -16,16 +16,16 @@ final class DrawnProgressTest {
     @Test
     void longDetailTakesItsPlace() {
         assertEquals(
-                "simulating 25 %, about 1 min 0 s left (2.5 dB, 1 of 3: 7 errors, 10 s to go)",
-                DrawnProgress.line("simulating", 0.25, 20, "2.5 dB, 1 of 3: 7 errors, 10 s to go")
+                "simulating 25 %, about 1 min 0 s left (2.5 dB, 1 of 3, 10 s left: 7 errors)",
+                DrawnProgress.line("simulating", 0.25, 20, "2.5 dB, 1 of 3, 10 s left: 7 errors")
                         .stripTrailing());
         assertEquals(
-                "25 %, 2.5 dB, 1 of 3: 37 errors, FER 2.2e-5..4.2e-5, 34.1 k/s, 2 min 5 s to go",
+                "25 %, 2.5 dB, 1 of 3, 2 min 5 s left: 37 errors, FER 2.2e-5..4.2e-5, 34.1 k fra",
                 DrawnProgress.line(
                                 "simulating",
                                 0.25,
                                 20,
-                                "2.5 dB, 1 of 3: 37 errors, FER 2.2e-5..4.2e-5, 34.1 k/s, 2 min 5 s to go")
+                                "2.5 dB, 1 of 3, 2 min 5 s left: 37 errors, FER 2.2e-5..4.2e-5, 34.1 k frames/s")
                         .stripTrailing());
     }
 

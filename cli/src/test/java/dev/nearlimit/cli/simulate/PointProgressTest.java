@@ -41,7 +41,7 @@ final class PointProgressTest {
         assertEquals(
                 List.of(
                         "300 2.5 dB, 2 of 4: 20 errors, FER 1.2e-3..3.1e-3",
-                        "350 2.5 dB, 2 of 4: 40 errors, FER 1.4e-3..2.7e-3, 1.00 k/s, 30 s to go"),
+                        "350 2.5 dB, 2 of 4, 30 s left: 40 errors, FER 1.4e-3..2.7e-3, 1.00 k frames/s"),
                 lines);
     }
 
