@@ -8,8 +8,6 @@ final class VectorKernels {
 
     static KernelSet all() {
         return new KernelSet(
-                new VectorNoiseKernels(),
-                VectorReceptionKernels.fits() ? new VectorReceptionKernels() : new PlainReceptionKernels(),
-                Optional.of(new VectorMinSumKernels()));
+                new VectorNoiseKernels(), new VectorReceptionKernels(), Optional.of(new VectorMinSumKernels()));
     }
 }

@@ -14,8 +14,7 @@ class VectorReceptionKernelsTest {
     private static final int GUARD = 70;
 
     private final ReceptionKernels plain = new PlainReceptionKernels();
-    private final ReceptionKernels vector =
-            VectorReceptionKernels.fits() ? new VectorReceptionKernels() : new PlainReceptionKernels();
+    private final ReceptionKernels vector = new VectorReceptionKernels();
 
     @ParameterizedTest
     @ValueSource(ints = {0, 1, 2, 7, 32})
