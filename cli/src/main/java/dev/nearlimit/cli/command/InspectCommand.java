@@ -6,6 +6,7 @@ import dev.nearlimit.algebra.graph.TannerGraph;
 import dev.nearlimit.algebra.weight.InfeasibleEnumerationException;
 import dev.nearlimit.algebra.weight.WeightEnumeration;
 import dev.nearlimit.cli.Session;
+import dev.nearlimit.cli.input.CodeArgument;
 import dev.nearlimit.cli.input.Ebn0List;
 import dev.nearlimit.cli.input.ThreadsOption;
 import dev.nearlimit.cli.output.OutputOptions;

@@ -2,6 +2,7 @@ package dev.nearlimit.cli.command;
 
 import dev.nearlimit.cli.ExitCode;
 import dev.nearlimit.cli.Session;
+import dev.nearlimit.cli.input.CodeArgument;
 import dev.nearlimit.cli.input.Ebn0List;
 import dev.nearlimit.cli.input.ShiftList;
 import dev.nearlimit.cli.input.ThreadsOption;

@@ -98,16 +98,24 @@ public final class TextTable {
         return column.right() ? blanks + cell : cell + blanks;
     }
 
-    /** Breaks a text at blanks into lines of a width; a word that is longer stays whole. */
+    /**
+     * Breaks a text at blanks into lines of a width. A word that is longer is broken behind its commas, if it has any;
+     * what is longer even so stays whole.
+     */
     public static List<String> wrap(String text, int width) {
         List<String> lines = new ArrayList<>();
         StringBuilder line = new StringBuilder();
         for (String word : text.split(" ")) {
-            if (line.length() > 0 && line.length() + 1 + word.length() > width) {
-                lines.add(line.toString());
-                line.setLength(0);
+            String before = line.length() > 0 ? " " : "";
+            for (String piece : word.length() > width ? word.split("(?<=,)") : new String[] {word}) {
+                if (line.length() > 0 && line.length() + before.length() + piece.length() > width) {
+                    lines.add(line.toString());
+                    line.setLength(0);
+                    before = "";
+                }
+                line.append(before).append(piece);
+                before = "";
             }
-            line.append(line.length() > 0 ? " " : "").append(word);
         }
         lines.add(line.toString());
         return lines;

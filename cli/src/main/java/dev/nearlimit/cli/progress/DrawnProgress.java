@@ -52,11 +52,22 @@ final class DrawnProgress implements Progress {
     }
 
     private String line(ProgressState state) {
-        double fraction = state.getNormalizedProgress();
+        double elapsedS = (System.nanoTime() - start) / NANOSECONDS;
+        return line(task, state.getNormalizedProgress(), elapsedS, state.getExtraMessage());
+    }
+
+    /** One line of exactly the terminal's width; the longer the detail, the less stands before it. */
+    static String line(String task, double fraction, double elapsedS, String detail) {
         int full = (int) (BAR * fraction);
-        String line = task + " [" + "=".repeat(full) + " ".repeat(BAR - full) + "] "
-                + Estimate.text((System.nanoTime() - start) / NANOSECONDS, fraction) + " (" + state.getExtraMessage()
-                + ")";
+        String bar = "[" + "=".repeat(full) + " ".repeat(BAR - full) + "]";
+        String estimate = Estimate.text(elapsedS, fraction);
+        String line = task + " " + bar + " " + estimate + " (" + detail + ")";
+        if (line.length() > WIDTH) {
+            line = task + " " + estimate + " (" + detail + ")";
+        }
+        if (line.length() > WIDTH) {
+            line = Estimate.share(fraction) + ", " + detail;
+        }
         // Blanks to the end wipe what a longer line has left.
         return (line + " ".repeat(WIDTH)).substring(0, WIDTH);
     }

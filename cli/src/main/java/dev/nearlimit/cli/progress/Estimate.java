@@ -9,6 +9,11 @@ final class Estimate {
     /** As {@code 25 %, about 1 min 0 s left}; without a guess while nothing is done. */
     static String text(double elapsedS, double fraction) {
         String left = fraction > 0 ? ", about " + Numbers.duration(elapsedS * (1 - fraction) / fraction) + " left" : "";
-        return Math.round(100 * fraction) + " %" + left;
+        return share(fraction) + left;
+    }
+
+    /** As {@code 25 %}. */
+    static String share(double fraction) {
+        return Math.round(100 * fraction) + " %";
     }
 }

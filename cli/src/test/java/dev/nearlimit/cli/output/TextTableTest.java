@@ -39,6 +39,13 @@ final class TextTableTest {
     }
 
     @Test
+    void longDesignatorIsBrokenBehindItsCommas() {
+        assertEquals(
+                java.util.List.of("of", "name:a=1,", "bb=22,c=3", "x,y"),
+                TextTable.wrap("of name:a=1,bb=22,c=3 x,y", 9));
+    }
+
+    @Test
     void rowMustFitTheColumns() {
         TextTable table = new TextTable().words("name");
         assertThrows(IllegalArgumentException.class, () -> table.row("a", "b"));

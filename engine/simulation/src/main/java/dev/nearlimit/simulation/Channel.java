@@ -1,5 +1,6 @@
 package dev.nearlimit.simulation;
 
+import java.util.List;
 import java.util.Locale;
 
 /** What is done to the symbols on their way. */
@@ -94,5 +95,10 @@ public sealed interface Channel {
         }
         throw new InvalidSimulationException("unknown channel '" + designator
                 + "'; known are awgn, bsc, bsc:p; awgn takes " + String.join("=dB and ", Mismatch.SETTINGS) + "=dB");
+    }
+
+    /** Names of the settings that a channel's designator takes, as in {@code awgn:gain=1}; empty where it takes none. */
+    static List<String> settings(String designator) {
+        return of(designator) instanceof Awgn ? Mismatch.SETTINGS : List.of();
     }
 }

@@ -24,18 +24,54 @@ public final class DecoderDesignator {
      *     or settings exclude each other; one line that says what is allowed
      */
     public static DecoderChoice parse(String designator) {
+        DecoderFamily family = family(designator);
+        SettingReader reader = reader(designator);
+        Quantiser quantiser = family.soft() ? QuantiserDesignator.take(reader) : new NoQuantiser();
+        DecoderChoice choice = new DecoderChoice(family.read(reader, quantiser), quantiser);
+        reader.finish(names(family));
+        return choice;
+    }
+
+    /**
+     * Names of the settings that the decoder of a designator takes, those of the quantiser included.
+     *
+     * @throws dev.nearlimit.decoders.InvalidDecoderException if the decoder is unknown
+     */
+    public static List<String> settings(String designator) {
+        return names(family(designator));
+    }
+
+    /**
+     * Whether a designator gives a setting.
+     *
+     * @throws dev.nearlimit.decoders.InvalidDecoderException if the decoder is unknown or its settings are ill-formed
+     */
+    public static boolean gives(String designator, String setting) {
+        return reader(designator).has(setting);
+    }
+
+    /** A designator with one setting more, unchecked until it is parsed. */
+    public static String with(String designator, String setting, String value) {
+        return designator + (designator.indexOf(':') < 0 ? ":" : ",") + setting + "=" + value;
+    }
+
+    private static DecoderFamily family(String designator) {
         String text = designator.trim().toLowerCase(Locale.ROOT);
         int colon = text.indexOf(':');
-        DecoderFamily family = DecoderCatalogue.standard().family(colon < 0 ? text : text.substring(0, colon));
-        SettingReader reader = SettingReader.of(family.name(), colon < 0 ? "" : text.substring(colon + 1));
+        return DecoderCatalogue.standard().family(colon < 0 ? text : text.substring(0, colon));
+    }
+
+    private static SettingReader reader(String designator) {
+        String text = designator.trim().toLowerCase(Locale.ROOT);
+        int colon = text.indexOf(':');
+        return SettingReader.of(family(designator).name(), colon < 0 ? "" : text.substring(colon + 1));
+    }
+
+    private static List<String> names(DecoderFamily family) {
         List<SettingHelp> known = new ArrayList<>(family.settings());
-        Quantiser quantiser = new NoQuantiser();
         if (family.soft()) {
             known.addAll(QuantiserDesignator.settings());
-            quantiser = QuantiserDesignator.take(reader);
         }
-        DecoderChoice choice = new DecoderChoice(family.read(reader, quantiser), quantiser);
-        reader.finish(known.stream().map(SettingHelp::name).toList());
-        return choice;
+        return known.stream().map(SettingHelp::name).toList();
     }
 }

@@ -1,4 +1,4 @@
-package dev.nearlimit.cli.command;
+package dev.nearlimit.cli.simulate;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
@@ -8,6 +8,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import dev.nearlimit.cli.Execution;
 import dev.nearlimit.cli.ExitCode;
 import dev.nearlimit.cli.Interruption;
+import dev.nearlimit.simulation.statistics.RelativeWidth;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
@@ -46,8 +47,27 @@ final class SimulateCommandTest {
                         "berLow",
                         "berHigh",
                         "averageIterations",
-                        "complete"),
+                        "complete",
+                        "stoppedBy",
+                        "detectedErrors",
+                        "uer",
+                        "uerHigh",
+                        "iterations",
+                        "bitErrorsPerFailedFrame"),
                 names(result.get("points").get(0)));
+        assertEquals(
+                List.of(
+                        "scheme",
+                        "seed",
+                        "stoppingRule",
+                        "requestedEbn0Db",
+                        "complete",
+                        "endedBy",
+                        "points",
+                        "performance"),
+                names(result));
+        assertEquals("[3.0,4.0]", result.get("requestedEbn0Db").toString());
+        assertTrue(result.get("complete").asBoolean());
         assertEquals(
                 List.of(
                         "kernel",
@@ -147,6 +167,140 @@ final class SimulateCommandTest {
         assertTrue(execution.out().contains("incomplete\n"), execution.out());
     }
 
+    /** Every way in which a point can end is told from the others, in each format. */
+    @Test
+    void whatEndedAPointIsSaid() {
+        assertEquals("frameErrors", stoppedBy("--ebn0", "0", "--frame-errors", "30"));
+        assertEquals("frames", stoppedBy("--ebn0", "30"));
+        String[] outOfTime = {
+            "simulate",
+            "hamming:7,4",
+            "--decoder",
+            "syndrome",
+            "--ebn0",
+            "30",
+            "--frames",
+            "1000000000000",
+            "--time-limit",
+            "4s",
+            "--format"
+        };
+        JsonNode result = Execution.of(with(outOfTime, "json")).json();
+        assertEquals("timeLimit", result.get("points").get(0).get("stoppedBy").asText());
+        assertFalse(result.get("complete").asBoolean());
+        assertEquals("timeLimit", result.get("endedBy").asText());
+        assertEquals(4.0, result.get("stoppingRule").get("timeLimitS").asDouble());
+        assertTrue(Execution.of(with(outOfTime, "csv")).out().contains(",false,timeLimit,"));
+        assertTrue(Execution.of(with(outOfTime, "table")).out().contains("not reproducible"));
+    }
+
+    private static String stoppedBy(String... more) {
+        return simulate(with(more, "--format", "json"))
+                .json()
+                .get("points")
+                .get(0)
+                .get("stoppedBy")
+                .asText();
+    }
+
+    @Test
+    void relativeWidthGivesAnIntervalAsNarrow() {
+        JsonNode result = simulate("--ebn0", "2", "--relative-width", "0.4", "--format", "json")
+                .json();
+        JsonNode point = result.get("points").get(0);
+        double width = point.get("ferHigh").asDouble() - point.get("ferLow").asDouble();
+        assertEquals("frameErrors", point.get("stoppedBy").asText());
+        assertTrue(width <= 0.4 * point.get("fer").asDouble(), point.toString());
+        assertEquals(0.4, result.get("stoppingRule").get("relativeWidth").asDouble());
+        assertEquals(
+                point.get("frameErrors").asInt(),
+                result.get("stoppingRule").get("frameErrors").asInt());
+        // The figure that the help gives.
+        assertTrue(Execution.of("simulate", "--help").out().contains("384"));
+        assertEquals(384, RelativeWidth.frameErrors(0.2));
+    }
+
+    /** Of several limits the first that is reached counts, and the rule says which one it was. */
+    @Test
+    void fewerFrameErrorsThanTheWidthTakesComeFirst() {
+        JsonNode rule = simulate("--ebn0", "2", "--relative-width", "0.4", "--frame-errors", "20", "--format", "json")
+                .json()
+                .get("stoppingRule");
+        assertEquals(20, rule.get("frameErrors").asInt());
+        assertTrue(rule.get("relativeWidth").isNull());
+    }
+
+    /** The decoder of a perfect code never declares a failure; bounded distance on most codes mostly does. */
+    @Test
+    void detailsTellKindsOfFailuresApart() {
+        JsonNode perfect =
+                simulate("--ebn0", "2", "--format", "json").json().get("points").get(0);
+        assertEquals(0, perfect.get("detectedErrors").asInt());
+        assertEquals(100, perfect.get("undetectedErrors").asInt());
+        JsonNode bounded = Execution.of(
+                        "simulate", "bch:63,45", "--decoder", "bounded-distance", "--ebn0", "3", "--format", "json")
+                .json()
+                .get("points")
+                .get(0);
+        assertTrue(bounded.get("detectedErrors").asInt() > 50, bounded.toString());
+        assertEquals(
+                100,
+                bounded.get("detectedErrors").asInt()
+                        + bounded.get("undetectedErrors").asInt());
+    }
+
+    /** Histograms hold the very frames that the counts do, and means follow from them. */
+    @Test
+    void histogramsAddUp() {
+        Execution json = Execution.of(
+                "simulate",
+                "ldpc-802.11n:648,1/2",
+                "--decoder",
+                "min-sum:iterations=10",
+                "--ebn0",
+                "1.25",
+                "--frames",
+                "300",
+                "--format",
+                "json");
+        JsonNode point = json.json().get("points").get(0);
+        long frames = 0;
+        long iterations = 0;
+        for (JsonNode bin : point.get("iterations").get("histogram")) {
+            frames += bin.get("frames").asLong();
+            iterations += bin.get("frames").asLong() * bin.get("iterations").asLong();
+        }
+        assertEquals(point.get("frames").asLong(), frames);
+        assertEquals(point.get("averageIterations").asDouble(), (double) iterations / frames, 1e-12);
+        long failed = 0;
+        for (JsonNode bin : point.get("bitErrorsPerFailedFrame").get("histogram")) {
+            failed += bin.get("frames").asLong();
+        }
+        assertEquals(point.get("frameErrors").asLong(), failed);
+        assertEquals(
+                point.get("bitErrors").asDouble() / failed,
+                point.get("bitErrorsPerFailedFrame").get("mean").asDouble(),
+                1e-9);
+    }
+
+    @Test
+    void detailsAndLongDesignatorsFitATerminal() {
+        Execution execution = Execution.of(
+                "simulate",
+                "ldpc-802.11n:648,1/2",
+                "--decoder",
+                "min-sum:iterations=10,word=5",
+                "--ebn0",
+                "1.25",
+                "--frames",
+                "300",
+                "--details");
+        assertTrue(execution.out().lines().allMatch(line -> line.length() <= 80), execution.out());
+        assertTrue(execution.out().contains(" detected, "), execution.out());
+        assertTrue(execution.out().contains("wrong bits "), execution.out());
+        assertTrue(execution.out().contains("iterations "), execution.out());
+    }
+
     @Test
     void timeLimitEndsARun() {
         Execution execution = Execution.of(
@@ -159,7 +313,7 @@ final class SimulateCommandTest {
                 "--frames",
                 "1000000000000",
                 "--time-limit",
-                "1s",
+                "4s",
                 "--format",
                 "json");
         assertEquals(0, execution.exitCode(), execution.err());

@@ -1,14 +1,15 @@
-package dev.nearlimit.cli.command;
+package dev.nearlimit.cli.simulate;
 
 import dev.nearlimit.cli.ExitCode;
 import dev.nearlimit.cli.Session;
 import dev.nearlimit.cli.failure.InputException;
+import dev.nearlimit.cli.input.CodeArgument;
 import dev.nearlimit.cli.input.Ebn0List;
 import dev.nearlimit.cli.input.ThreadsOption;
-import dev.nearlimit.cli.input.TimeLimit;
 import dev.nearlimit.cli.journal.JournalOptions;
 import dev.nearlimit.cli.journal.RunJournal;
 import dev.nearlimit.cli.output.OutputOptions;
+import dev.nearlimit.cli.output.Presentation;
 import dev.nearlimit.cli.progress.Progress;
 import dev.nearlimit.codes.Code;
 import dev.nearlimit.decoders.catalogue.DecoderChoice;
@@ -19,7 +20,6 @@ import dev.nearlimit.simulation.Channel;
 import dev.nearlimit.simulation.Point;
 import dev.nearlimit.simulation.Scheme;
 import dev.nearlimit.simulation.Simulator;
-import dev.nearlimit.simulation.StoppingRule;
 import java.util.List;
 import java.util.OptionalLong;
 import java.util.concurrent.Callable;
@@ -38,6 +38,8 @@ import picocli.CommandLine.Spec;
             "  nearlimit simulate ldpc-802.11n:648,1/2 --decoder min-sum:scale=6/8",
             "            --modulation qpsk --ebn0 1:0.25:2.5",
             "  nearlimit simulate golay:23,12 --decoder syndrome --channel bsc:0.01",
+            "  nearlimit simulate ldpc-802.11n:648,1/2 --decoder min-sum --ebn0 2",
+            "            --sweep word=4..7 --sweep step=0.25,0.5,1",
             "Every rate stands beside its 95 %% interval. Counts depend on code, decoder,",
             "channel, Eb/N0, seed and stopping rule alone: not on threads, machine or time.",
             "The same command goes on where a run was cut off; nearlimit runs lists what is",
@@ -79,7 +81,8 @@ public final class SimulateCommand implements Callable<Integer> {
             paramLabel = "CHANNEL",
             defaultValue = "awgn",
             description = "awgn; bsc, which is awgn after hard decisions; or bsc:p with a crossover probability,"
-                    + " which takes no Eb/N0 (default: ${DEFAULT-VALUE}).")
+                    + " which takes no Eb/N0. A receiver off by some dB: awgn:noise-estimate=1,gain=-0.5"
+                    + " (default: ${DEFAULT-VALUE}).")
     private String channel;
 
     @Option(
@@ -89,26 +92,23 @@ public final class SimulateCommand implements Callable<Integer> {
             description = "The same seed gives the same frames (default: ${DEFAULT-VALUE}).")
     private long seed;
 
-    @Option(
-            names = "--frames",
-            paramLabel = "N",
-            defaultValue = "1000000",
-            description = "Frames a point at most (default: ${DEFAULT-VALUE}).")
-    private long frames;
+    @Mixin
+    private StoppingOptions stopping;
 
     @Option(
-            names = "--frame-errors",
-            paramLabel = "N",
-            defaultValue = "100",
-            description = "Frame errors after which a point is finished (default: ${DEFAULT-VALUE}).")
-    private long frameErrors;
+            names = "--sweep",
+            paramLabel = "SETTING=VALUES",
+            converter = Sweep.Converter.class,
+            description = "Measure every value of a setting of decoder, quantiser or channel on the same frames and"
+                    + " noise, and compare frame by frame: word=4..8, gain=-2..2:0.5, schedule=layered,flooding."
+                    + " Given twice, all combinations.")
+    private List<Sweep> sweeps = List.of();
 
     @Option(
-            names = "--time-limit",
-            paramLabel = "TIME",
-            converter = TimeLimit.Converter.class,
-            description = "End after this time with what was counted, marked incomplete: 90s, 5m, 2h.")
-    private TimeLimit timeLimit;
+            names = "--details",
+            description = "Show detected and undetected failures, wrong bits of failed frames and iterations as well;"
+                    + " JSON always has them.")
+    private boolean details;
 
     @Mixin
     private ThreadsOption threads;
@@ -126,22 +126,52 @@ public final class SimulateCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Channel overChannel = Channel.of(channel);
-        List<Point> points = points(overChannel);
-        StoppingRule rule = new StoppingRule(frames, frameErrors);
-        DecoderChoice choice = DecoderDesignator.parse(decoder);
+        Request request = new Request(points(overChannel), seed, stopping.choice(), details);
         Modulation over = Modulation.of(modulation);
+        if (sweeps.isEmpty()) {
+            DecoderChoice choice = DecoderDesignator.parse(decoder);
+            Scheme scheme = new Scheme(argument.code(), choice.decoder(), over, choice.quantiser(), overChannel);
+            return run(request, (meter, kept) -> {
+                List<MeasuredPoint> measured = new SimulationRun(meter).measure(scheme, request.points());
+                return new SimulationReport(
+                        scheme,
+                        request,
+                        measured,
+                        meter.endedBy(),
+                        meter.performance(scheme.code().n(), kept));
+            });
+        }
         Code code = argument.code();
-        Scheme scheme = new Scheme(code, choice.decoder(), over, choice.quantiser(), overChannel);
+        SweepGrid grid = SweepGrid.of(sweeps, code, decoder, over, channel);
+        return run(request, (meter, kept) -> {
+            List<SweepPoint> measured = new SweepRun(meter).measure(grid, request.points());
+            return new SweepReport(
+                    grid, decoder, channel, request, measured, meter.endedBy(), meter.performance(code.n(), kept));
+        });
+    }
+
+    /** What is measured and how it reads. */
+    @FunctionalInterface
+    private interface Measurement {
+        /** @param kept whether blocks are kept in a journal that outlives the run */
+        Presentation measure(PointMeter meter, boolean kept);
+    }
+
+    private int run(Request request, Measurement measurement) {
         int workers = threads.count();
         // Each point is run once, so that without a file nothing needs to be kept.
         RunJournal kept = journal.open(session, new NoJournal());
-        SimulationReport report;
+        Presentation report;
         try (kept;
                 Progress progress =
                         Progress.start(session.terminal(), spec.commandLine().getErr(), "simulating")) {
-            SimulationRun run = new SimulationRun(
-                    new Simulator(workers, kept.journal()), scheme, seed, rule, session.interruption());
-            report = run.measure(points, timeLimit, kept.isFile(), progress);
+            PointMeter meter = new PointMeter(
+                    new Simulator(workers, kept.journal()),
+                    request.seed(),
+                    request.stopping(),
+                    session.interruption(),
+                    progress);
+            report = measurement.measure(meter, kept.isFile());
         }
         output.show(report);
         if (session.interruption().requested()) {

@@ -1,4 +1,4 @@
-package dev.nearlimit.cli.command;
+package dev.nearlimit.cli.input;
 
 import dev.nearlimit.cli.failure.InputException;
 import dev.nearlimit.codes.Code;
@@ -15,7 +15,7 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
 /** The argument CODE with the options that say what a matrix file means, mixed into every command that takes one code. */
-final class CodeArgument {
+public final class CodeArgument {
     /** What a user can call the role of a matrix. */
     enum Role {
         GENERATOR(MatrixRole.GENERATOR),
@@ -54,7 +54,7 @@ final class CodeArgument {
      * @throws InvalidCodeException if a designator names no code
      * @throws InputException if the role of a matrix is missing or out of place, or the file gives no code
      */
-    Code code() {
+    public Code code() {
         Catalogue catalogue = Catalogue.standard();
         if (catalogue.isKnownFamily(code) || !looksLikePath()) {
             if (role != null) {
