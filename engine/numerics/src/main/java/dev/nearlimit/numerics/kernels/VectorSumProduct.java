@@ -62,16 +62,25 @@ final class VectorSumProduct {
     private static void combine(int d, float[] scratch, int lanes) {
         int forward = d * lanes; // row d + i holds F_(i-1) until the message takes its place
         int backward = 2 * d * lanes;
+        int work = backward + lanes;
         System.arraycopy(scratch, 0, scratch, forward + lanes, lanes);
         for (int i = 1; i <= d - 2; i++) {
             VectorBoxPlus.combine(
-                    scratch, forward + i * lanes, scratch, i * lanes, scratch, forward + (i + 1) * lanes, lanes);
+                    scratch,
+                    forward + i * lanes,
+                    scratch,
+                    i * lanes,
+                    scratch,
+                    forward + (i + 1) * lanes,
+                    lanes,
+                    scratch,
+                    work);
         }
         System.arraycopy(scratch, (d - 1) * lanes, scratch, backward, lanes);
         for (int i = d - 2; i >= 1; i--) {
             int row = forward + i * lanes;
-            VectorBoxPlus.combine(scratch, row, scratch, backward, scratch, row, lanes);
-            VectorBoxPlus.combine(scratch, backward, scratch, i * lanes, scratch, backward, lanes);
+            VectorBoxPlus.combine(scratch, row, scratch, backward, scratch, row, lanes, scratch, work);
+            VectorBoxPlus.combine(scratch, backward, scratch, i * lanes, scratch, backward, lanes, scratch, work);
         }
         System.arraycopy(scratch, backward, scratch, forward, lanes);
     }

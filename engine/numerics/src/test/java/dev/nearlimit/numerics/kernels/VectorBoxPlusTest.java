@@ -20,7 +20,7 @@ class VectorBoxPlusTest {
 
     private static void compare(float[] a, float[] b, String where) {
         float[] result = new float[3 * LANES];
-        VectorBoxPlus.combine(a, 0, b, 0, result, LANES, LANES);
+        VectorBoxPlus.combine(a, 0, b, 0, result, LANES, LANES, new float[2 * LANES], 0);
         for (int l = 0; l < LANES; l++) {
             assertEquals(
                     Float.floatToRawIntBits(plain(a[l], b[l])),
@@ -90,7 +90,7 @@ class VectorBoxPlusTest {
             values[l] = (float) (3 * random.nextGaussian());
         }
         float[] before = values.clone();
-        VectorBoxPlus.combine(values, LANES, values, 0, values, LANES, LANES);
+        VectorBoxPlus.combine(values, LANES, values, 0, values, LANES, LANES, new float[2 * LANES], 0);
         for (int l = 0; l < LANES; l++) {
             assertEquals(before[l], values[l]);
             assertEquals(plain(before[LANES + l], before[l]), values[LANES + l]);
