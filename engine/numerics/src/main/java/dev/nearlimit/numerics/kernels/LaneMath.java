@@ -2,7 +2,6 @@ package dev.nearlimit.numerics.kernels;
 
 import static jdk.incubator.vector.VectorOperators.AND;
 import static jdk.incubator.vector.VectorOperators.ASHR;
-import static jdk.incubator.vector.VectorOperators.I2F;
 import static jdk.incubator.vector.VectorOperators.LSHL;
 import static jdk.incubator.vector.VectorOperators.LSHR;
 import static jdk.incubator.vector.VectorOperators.OR;
@@ -22,45 +21,10 @@ import jdk.incubator.vector.ShortVector;
  */
 final class LaneMath {
     private static final int SIGN = 0x80000000;
-    private static final int SQRT_HALF_BITS = 0x3f3504f3;
-    private static final float LN_2 = 0.69314718056f;
     private static final float TWO_TO_23 = 0x1p23f;
     private static final int BITS_OF_TWO_TO_23 = 0x4b000000;
 
     private LaneMath() {}
-
-    /** sqrt(-2 ln u) for the middle u of a cell, as in {@link Radius}. */
-    static FloatVector radius(IntVector cell) {
-        FloatVector w = ((FloatVector) cell.convert(I2F, 0)).add(0.5f);
-        IntVector bits = w.viewAsIntegralLanes();
-        IntVector e = bits.sub(SQRT_HALF_BITS).lanewise(ASHR, 23);
-        FloatVector m = bits.sub(e.lanewise(LSHL, 23)).viewAsFloatingLanes().sub(1f);
-        FloatVector exponent = ((FloatVector) e.convert(I2F, 0)).sub(31f).mul(LN_2);
-        FloatVector z = m.mul(m);
-        FloatVector ln =
-                logarithmPolynomial(m).mul(m).mul(z).sub(z.mul(0.5f)).add(m).add(exponent);
-        // As integers, floats below zero and -0 are below 0, so this is the maximum with +0 of plain Java.
-        return ln.mul(-2f).viewAsIntegralLanes().max(0).viewAsFloatingLanes().sqrt();
-    }
-
-    private static FloatVector logarithmPolynomial(FloatVector m) {
-        return m.mul(7.0376836292E-2f)
-                .add(-1.1514610310E-1f)
-                .mul(m)
-                .add(1.1676998740E-1f)
-                .mul(m)
-                .add(-1.2420140846E-1f)
-                .mul(m)
-                .add(1.4249322787E-1f)
-                .mul(m)
-                .add(-1.6668057665E-1f)
-                .mul(m)
-                .add(2.0000714765E-1f)
-                .mul(m)
-                .add(-2.4999993993E-1f)
-                .mul(m)
-                .add(3.3333331174E-1f);
-    }
 
     /** As in {@link PlainNoiseKernels}. */
     static FloatVector sine(FloatVector t, FloatVector t2) {

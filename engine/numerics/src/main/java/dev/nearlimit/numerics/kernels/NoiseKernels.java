@@ -34,10 +34,11 @@ public interface NoiseKernels {
     /**
      * radius[i] = {@link Radius#ofDraw}(high[i]); count is a multiple of 64.
      *
+     * @param scratch count values whose contents do not matter
      * @return whether any draw is below {@link Radius#REFINED_CELLS} cells: such draws are rare and are refined by the
      *     caller
      */
-    boolean radius(int[] high, float[] radius, int count);
+    boolean radius(int[] high, float[] radius, float[] scratch, int count);
 
     /**
      * Turns radii into pairs of samples.

@@ -56,7 +56,7 @@ final class PlainNoiseKernels implements NoiseKernels {
     }
 
     @Override
-    public boolean radius(int[] high, float[] radius, int count) {
+    public boolean radius(int[] high, float[] radius, float[] scratch, int count) {
         // Only a cell below 64 makes high >>> 7 zero and so the difference negative.
         int signs = 0;
         for (int i = 0; i < count; i++) {

@@ -24,6 +24,8 @@ final class VectorNoiseKernels implements NoiseKernels {
     private static final VectorSpecies<Integer> INTS = IntVector.SPECIES_PREFERRED;
     private static final VectorSpecies<Float> FLOATS = FloatVector.SPECIES_PREFERRED;
     private static final int LANES = 64;
+    private static final int SQRT_HALF_BITS = 0x3f3504f3;
+    private static final float LN_2 = 0.69314718056f;
     private static final float ANGLE_UNIT = (float) (Math.PI / 4 / 2147483648.0);
     private static final int SIGN = 0x80000000;
 
@@ -120,14 +122,63 @@ final class VectorNoiseKernels implements NoiseKernels {
     }
 
     @Override
-    public boolean radius(int[] high, float[] radius, int count) {
+    public boolean radius(int[] high, float[] radius, float[] scratch, int count) {
+        boolean tail = split(high, radius, scratch, count);
+        radius(radius, scratch, count);
+        return tail;
+    }
+
+    /**
+     * w = m * 2^e of {@link Radius}: leaves m - 1 and (e - 31) ln 2. A pass of its own, since the logarithm waits for itself
+     * most of the time, and the fewer operations a vector takes, the more vectors the processor has under way.
+     */
+    private static boolean split(int[] high, float[] mantissa, float[] exponent, int count) {
         IntVector signs = IntVector.zero(INTS);
         for (int i = 0; i < count; i += INTS.length()) {
             IntVector draw = IntVector.fromArray(INTS, high, i);
             signs = signs.lanewise(OR, draw.lanewise(LSHR, 7).sub(1));
-            LaneMath.radius(draw.lanewise(LSHR, 1)).intoArray(radius, i);
+            FloatVector w = ((FloatVector) draw.lanewise(LSHR, 1).convert(I2F, 0)).add(0.5f);
+            IntVector bits = w.viewAsIntegralLanes();
+            IntVector e = bits.sub(SQRT_HALF_BITS).lanewise(ASHR, 23);
+            bits.sub(e.lanewise(LSHL, 23)).viewAsFloatingLanes().sub(1f).intoArray(mantissa, i);
+            ((FloatVector) e.convert(I2F, 0)).sub(31f).mul(LN_2).intoArray(exponent, i);
         }
         return signs.reduceLanes(OR) < 0;
+    }
+
+    private static void radius(float[] radius, float[] exponent, int count) {
+        for (int i = 0; i < count; i += FLOATS.length()) {
+            FloatVector m = FloatVector.fromArray(FLOATS, radius, i);
+            FloatVector z = m.mul(m);
+            FloatVector ln = m.mul(7.0376836292E-2f)
+                    .add(-1.1514610310E-1f)
+                    .mul(m)
+                    .add(1.1676998740E-1f)
+                    .mul(m)
+                    .add(-1.2420140846E-1f)
+                    .mul(m)
+                    .add(1.4249322787E-1f)
+                    .mul(m)
+                    .add(-1.6668057665E-1f)
+                    .mul(m)
+                    .add(2.0000714765E-1f)
+                    .mul(m)
+                    .add(-2.4999993993E-1f)
+                    .mul(m)
+                    .add(3.3333331174E-1f)
+                    .mul(m)
+                    .mul(z)
+                    .sub(z.mul(0.5f))
+                    .add(m)
+                    .add(FloatVector.fromArray(FLOATS, exponent, i));
+            // As integers, floats below zero and -0 are below 0, so this is the maximum with +0 of plain Java.
+            ln.mul(-2f)
+                    .viewAsIntegralLanes()
+                    .max(0)
+                    .viewAsFloatingLanes()
+                    .sqrt()
+                    .intoArray(radius, i);
+        }
     }
 
     @Override

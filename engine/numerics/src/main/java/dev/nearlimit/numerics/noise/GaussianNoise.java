@@ -26,6 +26,7 @@ public final class GaussianNoise {
     private final int[] high = new int[ROWS * LANES];
     private final int[] low = new int[ROWS * LANES];
     private final float[] radius = new float[ROWS * LANES];
+    private final float[] scratch = new float[ROWS * LANES];
     private final float[] lastPair = new float[2 * LANES];
     private long frame;
     private int pairsDone;
@@ -90,7 +91,7 @@ public final class GaussianNoise {
     private void drawRadii(int rows) {
         int count = rows * LANES;
         kernels.halves(state, high, low, rows);
-        if (kernels.radius(high, radius, count)) {
+        if (kernels.radius(high, radius, scratch, count)) {
             refine(count);
         }
         pairsDone += rows;

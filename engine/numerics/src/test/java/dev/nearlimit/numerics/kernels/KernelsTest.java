@@ -19,7 +19,7 @@ class KernelsTest {
         public static void main(String[] args) {
             NoiseKernels kernels = Kernels.noise();
             float[] radius = new float[64];
-            kernels.radius(new int[64], radius, 64);
+            kernels.radius(new int[64], radius, new float[64], 64);
             System.out.println(Kernels.name() + " " + radius[63]);
         }
     }

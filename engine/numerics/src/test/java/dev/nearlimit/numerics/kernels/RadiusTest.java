@@ -119,10 +119,10 @@ class RadiusTest {
         high[3] = -1;
         high[4] = Integer.MIN_VALUE;
         high[5] = 128;
-        assertEquals(false, kernels.radius(high, new float[128], 128));
+        assertEquals(false, kernels.radius(high, new float[128], new float[128], 128));
         for (int draw : new int[] {0, 1, 127}) {
             high[77] = draw;
-            assertEquals(true, kernels.radius(high, new float[128], 128), "draw " + draw);
+            assertEquals(true, kernels.radius(high, new float[128], new float[128], 128), "draw " + draw);
         }
     }
 }

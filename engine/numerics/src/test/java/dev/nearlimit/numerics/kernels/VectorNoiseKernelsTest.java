@@ -86,8 +86,8 @@ class VectorNoiseKernelsTest {
             }
 
             float[][] radius = guarded(count);
-            plain.radius(high[0], radius[0], count);
-            vector.radius(high[0], radius[1], count);
+            plain.radius(high[0], radius[0], new float[count], count);
+            vector.radius(high[0], radius[1], new float[count], count);
             assertSameBits(radius[0], radius[1], where);
 
             float[][] samples = guarded(2 * count);
@@ -107,8 +107,8 @@ class VectorNoiseKernelsTest {
                 high[i] = random.nextInt() >>> (i % 32);
             }
             float[][] radius = guarded(high.length);
-            plain.radius(high, radius[0], high.length);
-            vector.radius(high, radius[1], high.length);
+            plain.radius(high, radius[0], new float[high.length], high.length);
+            vector.radius(high, radius[1], new float[high.length], high.length);
             assertSameBits(radius[0], radius[1], "seed 7, round " + round);
         }
     }
@@ -123,11 +123,11 @@ class VectorNoiseKernelsTest {
         high[1] = -1;
         high[2] = 128;
         high[3] = Integer.MIN_VALUE;
-        assertEquals(false, vector.radius(high, radius, count));
+        assertEquals(false, vector.radius(high, radius, new float[count], count));
         for (int i = 0; i < count; i++) {
             int kept = high[i];
             high[i] = random.nextInt(128);
-            assertTrue(vector.radius(high, radius, count), "draw " + i + " of " + count);
+            assertTrue(vector.radius(high, radius, new float[count], count), "draw " + i + " of " + count);
             high[i] = kept;
         }
     }

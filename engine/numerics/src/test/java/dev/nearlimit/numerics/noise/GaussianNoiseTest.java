@@ -206,8 +206,8 @@ class GaussianNoiseTest {
         }
 
         @Override
-        public boolean radius(int[] high, float[] radius, int count) {
-            return plain.radius(high, radius, count);
+        public boolean radius(int[] high, float[] radius, float[] scratch, int count) {
+            return plain.radius(high, radius, scratch, count);
         }
 
         @Override
