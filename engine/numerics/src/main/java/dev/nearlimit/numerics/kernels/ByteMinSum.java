@@ -23,34 +23,63 @@ final class ByteMinSum {
 
     static void update(CheckRun run, MinSumArithmetic arithmetic, byte[] posterior, byte[] message, byte[] scratch) {
         int lanes = run.lanes();
-        int[] bits = run.bits();
         byte largest = (byte) arithmetic.largestMessage();
         if (lanes % (2 * LANES.length()) == 0) {
-            read(bits, lanes, posterior, message, run.messages(), scratch, largest);
-            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (byte) arithmetic.offset());
-            send(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestPosterior());
+            read(run.bits(), lanes, posterior, message, run.messages(), scratch, largest);
         } else {
-            readSingly(bits, lanes, posterior, message, run.messages(), scratch, largest);
-            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (byte) arithmetic.offset());
-            sendSingly(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestPosterior());
+            readSingly(run.bits(), lanes, posterior, message, run.messages(), scratch, largest);
         }
+        finish(run, arithmetic, posterior, message, scratch);
     }
 
     static void updateStarting(
             CheckRun run, MinSumArithmetic arithmetic, byte[] posterior, byte[] message, byte[] scratch, byte[] keep) {
-        int lanes = run.lanes();
-        int[] bits = run.bits();
-        dropStarting(bits.length, lanes, message, run.messages(), keep);
-        update(run, arithmetic, posterior, message, scratch);
+        byte largest = (byte) arithmetic.largestMessage();
+        readStarting(run.bits(), run.lanes(), posterior, message, run.messages(), scratch, largest, keep);
+        finish(run, arithmetic, posterior, message, scratch);
     }
 
-    private static void dropStarting(int edges, int lanes, byte[] message, int messages, byte[] keep) {
+    private static void finish(
+            CheckRun run, MinSumArithmetic arithmetic, byte[] posterior, byte[] message, byte[] scratch) {
+        int lanes = run.lanes();
+        int[] bits = run.bits();
+        correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (byte) arithmetic.offset());
+        if (lanes % (2 * LANES.length()) == 0) {
+            send(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestPosterior());
+        } else {
+            sendSingly(bits, lanes, posterior, message, run.messages(), scratch, (byte) arithmetic.largestPosterior());
+        }
+    }
+
+    /** {@link #read}, where the messages of lanes that have just started count as 0. */
+    private static void readStarting(
+            int[] bits,
+            int lanes,
+            byte[] posterior,
+            byte[] message,
+            int messages,
+            byte[] scratch,
+            byte largest,
+            byte[] keep) {
+        int minima = bits.length * lanes;
         for (int l = 0; l < lanes; l += LANES.length()) {
             ByteVector kept = ByteVector.fromArray(LANES, keep, l);
-            for (int i = 0; i < edges; i++) {
-                int at = messages + i * lanes + l;
-                ByteVector.fromArray(LANES, message, at).lanewise(AND, kept).intoArray(message, at);
+            ByteVector least = ByteVector.broadcast(LANES, largest);
+            ByteVector second = least;
+            ByteVector sign = ByteVector.zero(LANES);
+            for (int i = 0; i < bits.length; i++) {
+                ByteVector t = ByteVector.fromArray(LANES, posterior, bits[i] + l)
+                        .sub(ByteVector.fromArray(LANES, message, messages + i * lanes + l)
+                                .lanewise(AND, kept));
+                t.intoArray(scratch, i * lanes + l);
+                ByteVector magnitude = t.lanewise(ABS);
+                sign = sign.lanewise(XOR, t);
+                second = second.min(least.max(magnitude));
+                least = least.min(magnitude);
             }
+            least.intoArray(scratch, minima + l);
+            second.intoArray(scratch, minima + lanes + l);
+            sign.intoArray(scratch, minima + 2 * lanes + l);
         }
     }
 
@@ -183,14 +212,22 @@ final class ByteMinSum {
     }
 
     static void addUnsatisfied(CheckRun run, byte[] posterior, byte[] found) {
-        int[] bits = run.bits();
-        for (int l = 0; l < run.lanes(); l += LANES.length()) {
-            ByteVector sum = ByteVector.fromArray(LANES, posterior, bits[0] + l);
-            for (int i = 1; i < bits.length; i++) {
+        for (int l = 0; l < FRAMES; l += LANES.length()) {
+            addUnsatisfied(run.bits(), run.lanes(), l, posterior, found);
+        }
+    }
+
+    /** What is found in one vector's lanes, over all checks of the run. */
+    private static void addUnsatisfied(int[] bits, int lanes, int first, byte[] posterior, byte[] found) {
+        ByteVector any = ByteVector.fromArray(LANES, found, first);
+        for (int l = first; l < lanes; l += FRAMES) {
+            ByteVector sum = ByteVector.zero(LANES);
+            for (int i = 0; i < bits.length; i++) {
                 sum = sum.lanewise(XOR, ByteVector.fromArray(LANES, posterior, bits[i] + l));
             }
-            ByteVector.fromArray(LANES, found, l % FRAMES).lanewise(OR, sum).intoArray(found, l % FRAMES);
+            any = any.lanewise(OR, sum);
         }
+        any.intoArray(found, first);
     }
 
     static void start(byte[] posterior, byte[] received, byte[] keep) {

@@ -23,17 +23,13 @@ final class ShortMinSum {
 
     static void update(CheckRun run, MinSumArithmetic arithmetic, short[] posterior, short[] message, short[] scratch) {
         int lanes = run.lanes();
-        int[] bits = run.bits();
         short largest = (short) arithmetic.largestMessage();
         if (lanes % (2 * LANES.length()) == 0) {
-            read(bits, lanes, posterior, message, run.messages(), scratch, largest);
-            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (short) arithmetic.offset());
-            send(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestPosterior());
+            read(run.bits(), lanes, posterior, message, run.messages(), scratch, largest);
         } else {
-            readSingly(bits, lanes, posterior, message, run.messages(), scratch, largest);
-            correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (short) arithmetic.offset());
-            sendSingly(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestPosterior());
+            readSingly(run.bits(), lanes, posterior, message, run.messages(), scratch, largest);
         }
+        finish(run, arithmetic, posterior, message, scratch);
     }
 
     static void updateStarting(
@@ -43,19 +39,52 @@ final class ShortMinSum {
             short[] message,
             short[] scratch,
             short[] keep) {
-        int lanes = run.lanes();
-        int[] bits = run.bits();
-        dropStarting(bits.length, lanes, message, run.messages(), keep);
-        update(run, arithmetic, posterior, message, scratch);
+        short largest = (short) arithmetic.largestMessage();
+        readStarting(run.bits(), run.lanes(), posterior, message, run.messages(), scratch, largest, keep);
+        finish(run, arithmetic, posterior, message, scratch);
     }
 
-    private static void dropStarting(int edges, int lanes, short[] message, int messages, short[] keep) {
+    private static void finish(
+            CheckRun run, MinSumArithmetic arithmetic, short[] posterior, short[] message, short[] scratch) {
+        int lanes = run.lanes();
+        int[] bits = run.bits();
+        correct(scratch, bits.length * lanes, lanes, arithmetic.eighths(), (short) arithmetic.offset());
+        if (lanes % (2 * LANES.length()) == 0) {
+            send(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestPosterior());
+        } else {
+            sendSingly(bits, lanes, posterior, message, run.messages(), scratch, (short) arithmetic.largestPosterior());
+        }
+    }
+
+    /** {@link #read}, where the messages of lanes that have just started count as 0. */
+    private static void readStarting(
+            int[] bits,
+            int lanes,
+            short[] posterior,
+            short[] message,
+            int messages,
+            short[] scratch,
+            short largest,
+            short[] keep) {
+        int minima = bits.length * lanes;
         for (int l = 0; l < lanes; l += LANES.length()) {
             ShortVector kept = ShortVector.fromArray(LANES, keep, l);
-            for (int i = 0; i < edges; i++) {
-                int at = messages + i * lanes + l;
-                ShortVector.fromArray(LANES, message, at).lanewise(AND, kept).intoArray(message, at);
+            ShortVector least = ShortVector.broadcast(LANES, largest);
+            ShortVector second = least;
+            ShortVector sign = ShortVector.zero(LANES);
+            for (int i = 0; i < bits.length; i++) {
+                ShortVector t = ShortVector.fromArray(LANES, posterior, bits[i] + l)
+                        .sub(ShortVector.fromArray(LANES, message, messages + i * lanes + l)
+                                .lanewise(AND, kept));
+                t.intoArray(scratch, i * lanes + l);
+                ShortVector magnitude = t.lanewise(ABS);
+                sign = sign.lanewise(XOR, t);
+                second = second.min(least.max(magnitude));
+                least = least.min(magnitude);
             }
+            least.intoArray(scratch, minima + l);
+            second.intoArray(scratch, minima + lanes + l);
+            sign.intoArray(scratch, minima + 2 * lanes + l);
         }
     }
 
@@ -188,13 +217,21 @@ final class ShortMinSum {
     }
 
     static void addUnsatisfied(CheckRun run, short[] posterior, short[] found) {
-        int[] bits = run.bits();
-        for (int l = 0; l < run.lanes(); l += LANES.length()) {
-            ShortVector sum = ShortVector.fromArray(LANES, posterior, bits[0] + l);
-            for (int i = 1; i < bits.length; i++) {
+        for (int l = 0; l < FRAMES; l += LANES.length()) {
+            addUnsatisfied(run.bits(), run.lanes(), l, posterior, found);
+        }
+    }
+
+    /** What is found in one vector's lanes, over all checks of the run. */
+    private static void addUnsatisfied(int[] bits, int lanes, int first, short[] posterior, short[] found) {
+        ShortVector any = ShortVector.fromArray(LANES, found, first);
+        for (int l = first; l < lanes; l += FRAMES) {
+            ShortVector sum = ShortVector.zero(LANES);
+            for (int i = 0; i < bits.length; i++) {
                 sum = sum.lanewise(XOR, ShortVector.fromArray(LANES, posterior, bits[i] + l));
             }
-            ShortVector.fromArray(LANES, found, l % FRAMES).lanewise(OR, sum).intoArray(found, l % FRAMES);
+            any = any.lanewise(OR, sum);
         }
+        any.intoArray(found, first);
     }
 }

@@ -57,6 +57,14 @@ final class SignBits {
 
     private static void merge(long[] scratch, long[] bits, int first, int rows) {
         int each = LONGS.length();
+        if (each == 4) {
+            // Written out for registers of 256 bits: a loop of four costs as much as all the rest.
+            for (int row = 0; row < rows; row++) {
+                int at = 4 * row;
+                bits[first + row] = scratch[at] | scratch[at + 1] | scratch[at + 2] | scratch[at + 3];
+            }
+            return;
+        }
         for (int row = 0; row < rows; row++) {
             long word = 0;
             for (int i = row * each; i < (row + 1) * each; i++) {
