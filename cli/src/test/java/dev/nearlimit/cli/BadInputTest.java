@@ -77,6 +77,8 @@ final class BadInputTest {
                 "simulate hamming:7,4 --decoder min-sum:iterations=0 --ebn0 1 | iterations of min-sum is 0, must be a whole number 1..1000",
                 "simulate hamming:7,4 --decoder min-sum:word=9 --ebn0 1 | word of min-sum is 9, must be a whole number 1..8",
                 "simulate hamming:7,4 --decoder min-sum:word=1 --ebn0 1 | word of a mid-tread quantiser is 1 bits, must be 2..8",
+                "simulate hamming:7,4 --decoder min-sum:word=2 --ebn0 1 | messages of 2 bits reach 1, and offset=1 takes all of them to 0; needs a longer message-word or less of it",
+                "simulate hamming:7,4 --decoder min-sum:word=2,scale=6/8 --ebn0 1 | messages of 2 bits reach 1, and scale=6/8 takes all of them to 0; needs a longer message-word or less of it",
                 "simulate hamming:7,4 --decoder min-sum:word=6,posterior-word=5 --ebn0 1 | posterior-word of min-sum is 5, must be a whole number 6..15",
                 "simulate hamming:7,4 --decoder syndrome --ebn0 1 --channel awgn:gain=loud | gain is 'loud', must be a number in dB with at most six decimals",
                 "simulate hamming:7,4 --decoder syndrome --ebn0 1 --channel awgn:loss=1 | unknown setting 'loss' of channel awgn; allowed are noise-estimate, gain",

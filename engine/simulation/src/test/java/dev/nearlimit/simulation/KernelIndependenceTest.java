@@ -22,7 +22,13 @@ class KernelIndependenceTest {
             "min-sum:iterations=8,word=5,scale=6/8",
             "min-sum:iterations=8,word=6",
             "min-sum:iterations=8,word=5,schedule=flooding",
-            "sum-product:iterations=4");
+            "min-sum:iterations=8,word=6,schedule=flooding",
+            "min-sum:iterations=8,word=5,step=0.7",
+            "min-sum:iterations=8,word=4,step=0.7,rise=mid-rise",
+            "min-sum:iterations=8",
+            "min-sum:iterations=8,schedule=flooding",
+            "sum-product:iterations=4",
+            "sum-product:iterations=4,schedule=flooding");
 
     static final class Probe {
         private Probe() {}

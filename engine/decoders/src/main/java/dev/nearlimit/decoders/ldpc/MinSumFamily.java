@@ -62,8 +62,21 @@ public final class MinSumFamily implements DecoderFamily {
         MagnitudeCorrection correction = scale.<MagnitudeCorrection>map(MagnitudeCorrection.Scale::new)
                 .or(() -> offset.map(MagnitudeCorrection.Offset::new))
                 .orElse(fixedPoint ? FIXED_POINT_STANDARD : STANDARD);
-        return new MinSumSettings(
-                iterations, correction, fixedPoint ? Optional.of(words(reader, quantiser)) : none(reader));
+        Optional<WordLengths> words = fixedPoint ? Optional.of(words(reader, quantiser)) : none(reader);
+        words.ifPresent(w -> refuseSilence(w, correction));
+        return new MinSumSettings(iterations, correction, words);
+    }
+
+    /** Checks that could send nothing but zeros would make a decoder of no effect, which nobody means. */
+    private static void refuseSilence(WordLengths words, MagnitudeCorrection correction) {
+        int largest = words.largestMessage();
+        boolean silent = correction instanceof MagnitudeCorrection.Scale scale
+                ? scale.eighths() * largest / 8 == 0
+                : correction instanceof MagnitudeCorrection.Offset offset && offset.amount() >= largest;
+        if (silent) {
+            throw new InvalidDecoderException("messages of " + words.message() + " bits reach " + largest + ", and "
+                    + correction.designator() + " takes all of them to 0; needs a longer message-word or less of it");
+        }
     }
 
     private static WordLengths words(SettingReader reader, Quantiser quantiser) {
