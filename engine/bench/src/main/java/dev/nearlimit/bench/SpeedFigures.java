@@ -49,7 +49,9 @@ public final class SpeedFigures {
         print("decoder [Mb/s]", best(decoder()) / 1e6);
         print("end to end [Mb/s]", best(endToEnd("early-stop=false")) / 1e6);
         print("end to end, early stop [Mb/s]", best(endToEnd("early-stop=true")) / 1e6);
-        print("two threads over one [times]", twoThreads());
+        if (!Kernels.name().equals("plain")) { // there it would take minutes to say the same
+            print("two threads over one [times]", twoThreads());
+        }
     }
 
     /** How many times as fast two threads are as one, both by the clock on the wall and in turn; needs two idle cores. */
