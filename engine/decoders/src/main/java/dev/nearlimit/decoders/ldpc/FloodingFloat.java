@@ -48,10 +48,7 @@ final class FloodingFloat extends BeliefPropagation {
     void iterate() {
         for (int run = 0; run < passes.runs(); run++) {
             CheckRun onCopy = passes.onCopy(run);
-            int[] bits = passes.bits(run);
-            for (int i = 0; i < bits.length; i++) {
-                System.arraycopy(posterior, bits[i], copy, onCopy.bits()[i], onCopy.lanes());
-            }
+            passes.copyPosteriors(run, posterior, copy);
             checks.update(onCopy, copy, message, scratch);
         }
         sums.sum(passes.edges(), channel, message, posterior);

@@ -62,9 +62,17 @@ final class FloodingPasses {
         return runs;
     }
 
-    /** Where the posteriors of a run's bits begin. */
-    int[] bits(int run) {
-        return runs[run].bits();
+    /**
+     * Copies the posteriors that a run reads to where {@link #onCopy} has them.
+     *
+     * @param posteriors array of any element type
+     * @param copy another of the same, of {@link #copyLength()} elements
+     */
+    void copyPosteriors(int run, Object posteriors, Object copy) {
+        int[] from = runs[run].bits();
+        for (int i = 0; i < from.length; i++) {
+            System.arraycopy(posteriors, from[i], copy, onCopy[run].bits()[i], onCopy[run].lanes());
+        }
     }
 
     /** A run whose bits lie in the copy, one after the other. */

@@ -71,10 +71,13 @@ final class Lanes {
         }
         for (long rest = ~running & ~lookedAt; rest != 0; rest = ~running & ~lookedAt) {
             long wanted = batch[Long.numberOfTrailingZeros(rest)];
-            long lanes = wanting(wanted, rest);
+            long lanes = at(wanted, rest);
             lookedAt |= lanes;
             if (wanted < batches || fetch(source)) {
                 running |= lanes;
+                for (long some = lanes; some != 0; some &= some - 1) {
+                    taken[Long.numberOfTrailingZeros(some)] = 0;
+                }
                 toStart = underWay[slot(wanted)];
                 return lanes;
             }
@@ -88,13 +91,13 @@ final class Lanes {
         return toStart;
     }
 
-    private long wanting(long wanted, long among) {
+    /** Those of some lanes that are at a batch. */
+    private long at(long number, long among) {
         long lanes = 0;
         for (long rest = among; rest != 0; rest &= rest - 1) {
             int lane = Long.numberOfTrailingZeros(rest);
-            if (batch[lane] == wanted) {
+            if (batch[lane] == number) {
                 lanes |= 1L << lane;
-                taken[lane] = 0;
             }
         }
         return lanes;
@@ -136,13 +139,7 @@ final class Lanes {
         running &= ~lanes;
         for (long rest = lanes; rest != 0; ) {
             long number = batch[Long.numberOfTrailingZeros(rest)];
-            long together = 0;
-            for (long some = rest; some != 0; some &= some - 1) {
-                int lane = Long.numberOfTrailingZeros(some);
-                if (batch[lane] == number) {
-                    together |= 1L << lane;
-                }
-            }
+            long together = at(number, rest);
             finished.accept(number, together, ended);
             for (long some = together; some != 0; some &= some - 1) {
                 batch[Long.numberOfTrailingZeros(some)] = number + 1;

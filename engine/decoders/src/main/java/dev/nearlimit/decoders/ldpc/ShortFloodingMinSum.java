@@ -66,10 +66,7 @@ final class ShortFloodingMinSum extends BeliefPropagation {
         }
         for (int run = 0; run < passes.runs(); run++) {
             CheckRun onCopy = passes.onCopy(run);
-            int[] bits = passes.bits(run);
-            for (int i = 0; i < bits.length; i++) {
-                System.arraycopy(posterior, bits[i], copy, onCopy.bits()[i], onCopy.lanes());
-            }
+            passes.copyPosteriors(run, posterior, copy);
             if (some) {
                 checks.updateStarting(onCopy, arithmetic, copy, message, scratch, keep);
             } else {
